@@ -1,0 +1,9 @@
+import { defineConfig } from 'vitest/config';
+
+export default defineConfig({
+  test: {
+    include: ['test/{core,main,renderer,house,published}/**/*.test.{ts,tsx}'],
+    environment: 'node',
+    testTimeout: 20_000,
+  },
+});
