@@ -178,7 +178,7 @@ export interface BarrierDoubt {
 export const verdictSubjects = ['coagulation', 'flocculation', 'settling'] as const;
 export type VerdictSubject = (typeof verdictSubjects)[number];
 
-/** `borderline`: the margin is smaller than the doubt. */
+/** `borderline`: the margin is smaller than its doubt. */
 export type VerdictLevel = 'holds' | 'borderline' | 'fails';
 
 export interface Verdict {
@@ -216,4 +216,4 @@ export interface Limit {
   readonly statement: string;
 }
 
-export type LimitInput = 'salt' | 'zeta' | 'layerThickness' | 'diameter' | 'viscosity' | 'temperature' | 'loading';
+export type LimitInput = 'salt' | 'zeta' | 'layerThickness' | 'diameter' | 'viscosity';

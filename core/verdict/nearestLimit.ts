@@ -1,0 +1,69 @@
+/** One input moved while all others stay: how far it may go before the answer turns. */
+export interface LimitSearch {
+  /** Value now, in the unit of `from` and `to`. */
+  readonly current: number;
+  readonly from: number;
+  readonly to: number;
+  /** Positive when the formulation holds at this value, negative when it fails; not a number where it cannot be told. */
+  readonly margin: (value: number) => number;
+}
+
+export interface TurningPoint {
+  readonly value: number;
+  /** `above`: the formulation holds above the value; `below`: it holds below. */
+  readonly holds: 'above' | 'below';
+}
+
+const STEPS_EACH_WAY = 14;
+const RELATIVE_TOLERANCE = 1e-3;
+
+/** From `current` outwards to `end`: equal ratios where both are of one sign, equal steps otherwise. */
+function outward(current: number, end: number): number[] {
+  const byRatio = current * end > 0;
+  return Array.from({ length: STEPS_EACH_WAY }, (_, index) => {
+    const share = (index + 1) / STEPS_EACH_WAY;
+    // Steps grow with the distance, so that a limit close by is not jumped over.
+    const reach = share ** 1.5;
+    return byRatio ? current * (end / current) ** reach : current + (end - current) * reach;
+  });
+}
+
+function bisect(search: LimitSearch, inside: number, outside: number, insidePositive: boolean): number {
+  let near = inside;
+  let far = outside;
+  while (Math.abs(far - near) > RELATIVE_TOLERANCE * Math.max(Math.abs(far), Math.abs(near))) {
+    const middle = (near + far) / 2;
+    if (middle === near || middle === far) break;
+    if (search.margin(middle) > 0 === insidePositive) near = middle;
+    else far = middle;
+  }
+  return (near + far) / 2;
+}
+
+/**
+ * Value nearest to the current one (as a ratio) at which the margin changes sign, or null when it keeps its sign in
+ * the whole range. Found on the full model by stepping outwards and bisecting to 0.1 %, so a limit is always a place
+ * where both sides were evaluated; a window narrower than a step (1/14 of the way) can be missed.
+ */
+export function nearestLimit(search: LimitSearch): TurningPoint | null {
+  const { current, from, to } = search;
+  const holdsNow = search.margin(current) > 0;
+  const found: TurningPoint[] = [];
+  for (const end of [from, to]) {
+    if (end === current) continue;
+    let previous = current;
+    for (const value of outward(current, end)) {
+      const holds = search.margin(value) > 0;
+      if (holds !== holdsNow) {
+        const limit = bisect(search, previous, value, holdsNow);
+        const currentSide = end > current ? 'below' : 'above';
+        found.push({ value: limit, holds: holdsNow ? currentSide : currentSide === 'below' ? 'above' : 'below' });
+        break;
+      }
+      previous = value;
+    }
+  }
+  const distance = ({ value }: TurningPoint): number =>
+    value * current > 0 ? Math.abs(Math.log(value / current)) : Math.abs(value - current) / (to - from) + 1;
+  return found.sort((a, b) => distance(a) - distance(b)).at(0) ?? null;
+}

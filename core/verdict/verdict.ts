@@ -1,0 +1,108 @@
+import { pairRates } from '../coagulation/pairRates';
+import { wellOccupation } from '../coagulation/wellOccupation';
+import type { PairEvaluation, ParticleState, Verdict } from '../evaluation';
+import type { PairDoubt } from '../formulation/doubt';
+import { particleState } from '../formulation/particleState';
+import { type SolvedFormulation, type SolvedPair, solve } from '../formulation/solve';
+import type { Formulation } from '../scenario/scenario';
+import { COAGULATION_LEVERS, coagulationLine, coagulationMargin } from './coagulationLine';
+import { findLimits } from './findLimits';
+import { FLOCCULATION_LEVERS, flocculationLine, flocculationMargin } from './flocculationLine';
+import { worstOf } from './level';
+import { notConsidered } from './notConsidered';
+import type { RequirementModel } from '../formulation/requirementModel';
+import { SETTLING_LEVERS, settlingLine, settlingMargin } from './settlingLine';
+
+export interface VerdictQuestion {
+  readonly formulation: Formulation;
+  readonly solved: SolvedFormulation;
+  readonly requirement: RequirementModel;
+  /** One for each pair. */
+  readonly doubts: readonly PairDoubt[];
+  readonly pairs: readonly PairEvaluation[];
+  readonly particles: readonly ParticleState[];
+  readonly weakestPair: number;
+}
+
+const kindsOf = ({ first, second }: SolvedPair): readonly number[] => [first, second];
+
+/** The pair whose reachable well is deepest. */
+const deepestWell = (pairs: readonly SolvedPair[]): number => {
+  const margins = pairs.map(flocculationMargin);
+  return margins.indexOf(Math.min(...margins));
+};
+
+const firstToSettle = (particles: readonly ParticleState[], requirement: RequirementModel): number => {
+  const margins = particles.map(({ settling }) => settlingMargin(settling, requirement));
+  return margins.indexOf(Math.min(...margins));
+};
+
+/** Margin of a changed formulation; not a number when it cannot be evaluated, which counts as not holding. */
+const marginOf =
+  (margin: (solved: SolvedFormulation) => number) =>
+  (formulation: Formulation): number => {
+    const solved = solve(formulation);
+    return solved.ok ? margin(solved.value) : Number.NaN;
+  };
+
+/** Three separate answers, each with its numbers, its margin and its limits; never one bare word. */
+export function verdict(question: VerdictQuestion): Verdict {
+  const { formulation, solved, requirement, doubts, pairs, particles, weakestPair } = question;
+  const viscosity_mPa_s = 1000 * solved.model.medium.viscosity_Pa_s;
+  const lever = (kinds: readonly number[]) => ({ formulation, kinds, viscosity_mPa_s });
+
+  const weakest = solved.pairs[weakestPair];
+  const coagulation = coagulationLine({
+    pair: weakest,
+    rates: pairs[weakestPair].rates,
+    doubt: doubts[weakestPair],
+    limits: findLimits(
+      COAGULATION_LEVERS,
+      lever(kindsOf(weakest)),
+      marginOf((changed) =>
+        Math.min(
+          ...changed.pairs.map((pair) => coagulationMargin(pairRates({ solved: changed, pair, requirement }))),
+        ),
+      ),
+    ),
+  });
+
+  const clinging = deepestWell(solved.pairs);
+  const flocculation = flocculationLine({
+    pair: solved.pairs[clinging],
+    depthDoubt_kT: doubts[clinging].outerMinimum_kT,
+    pairedShare: wellOccupation({ solved, pair: solved.pairs[clinging] }),
+    limits: findLimits(
+      FLOCCULATION_LEVERS,
+      lever(kindsOf(solved.pairs[clinging])),
+      marginOf((changed) => Math.min(...changed.pairs.map(flocculationMargin))),
+    ),
+  });
+
+  const settler = firstToSettle(particles, requirement);
+  const settling = settlingLine({
+    particleName: particles[settler].name,
+    settling: particles[settler].settling,
+    requirement,
+    viscosityMeasured: solved.model.medium.measured.includes('viscosity_Pa_s'),
+    limits: findLimits(
+      SETTLING_LEVERS,
+      lever([settler]),
+      marginOf(({ model }) =>
+        Math.min(
+          ...model.particles.map((particle) =>
+            settlingMargin(particleState(particle, model, requirement).settling, requirement),
+          ),
+        ),
+      ),
+    ),
+  });
+
+  const lines = [coagulation, flocculation, settling];
+  const solids = particles.reduce((sum, { volumeFraction }) => sum + volumeFraction, 0);
+  return {
+    level: worstOf(lines.map(({ level }) => level)),
+    lines,
+    notConsidered: notConsidered(formulation, solids),
+  };
+}
