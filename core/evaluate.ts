@@ -1,7 +1,7 @@
 import { evaluateFormulation } from './evaluateFormulation';
 import type { Evaluation, FormulationOutcome } from './evaluation';
-import type { Scenario } from './scenario/scenario';
 import { pointerTo } from './scenario/reader';
+import type { Scenario } from './scenario/scenario';
 
 /**
  * The front door: what becomes of every formulation of a checked scenario. Deterministic to the last digit; a

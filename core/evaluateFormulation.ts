@@ -1,14 +1,14 @@
 import type { FormulationEvaluation } from './evaluation';
+import { pairDoubt } from './formulation/doubt';
+import { pairEvaluation } from './formulation/pairEvaluation';
+import { particleState } from './formulation/particleState';
+import { requirementModel } from './formulation/requirementModel';
+import { solve } from './formulation/solve';
 import { done, type Result } from './problem';
 import type { Formulation, Requirement } from './scenario/scenario';
 import type { Caveat } from './validity';
 import { coagulationMargin } from './verdict/coagulationLine';
-import { requirementModel } from './formulation/requirementModel';
 import { verdict } from './verdict/verdict';
-import { pairDoubt } from './formulation/doubt';
-import { pairEvaluation } from './formulation/pairEvaluation';
-import { particleState } from './formulation/particleState';
-import { solve } from './formulation/solve';
 
 /** The same doubt is said once, however many pairs raise it. */
 const unrepeated = (caveats: readonly Caveat[]): readonly Caveat[] =>

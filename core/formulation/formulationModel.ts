@@ -6,13 +6,7 @@ import { findMaterial } from '../materials/catalogue';
 import type { Material } from '../materials/material';
 import { mediumState } from '../medium/mediumState';
 import { done, type Problem, type Result, refused } from '../problem';
-import {
-  K_from_degC,
-  kg_m2_from_mg_m2,
-  kg_mol_from_g_mol,
-  m_from_nm,
-  V_from_mV,
-} from '../quantities/convert';
+import { K_from_degC, kg_m2_from_mg_m2, kg_mol_from_g_mol, m_from_nm, V_from_mV } from '../quantities/convert';
 import type { Formulation, Particle } from '../scenario/scenario';
 import type { LayerInput } from '../stericLayer/layerProperties';
 import type { Caveat } from '../validity';

@@ -36,8 +36,7 @@ export function sharesOf(loadings: readonly Loading[], mediumDensity_kg_m3: numb
     }
   }
   const mediumIfAlone_kg = mediumDensity_kg_m3 * (1 - givenVolume);
-  const mass_kg =
-    (givenVolumeMass_kg + mediumIfAlone_kg) / (1 - givenMass + mediumDensity_kg_m3 * volumePerMass_m3_kg);
+  const mass_kg = (givenVolumeMass_kg + mediumIfAlone_kg) / (1 - givenMass + mediumDensity_kg_m3 * volumePerMass_m3_kg);
   if (givenMass >= 1 || givenVolume >= 1 || !(mass_kg > 0)) return null;
   const shares = loadings.map(({ basis, fraction, density_kg_m3 }) =>
     basis === 'volume'

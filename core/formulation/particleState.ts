@@ -1,8 +1,8 @@
 import { surfacePotentialFromZeta } from '../doubleLayer/slipPlane';
 import type { MediumState, ParticleState } from '../evaluation';
 import { settlingState } from '../settling/settlingState';
-import type { RequirementModel } from './requirementModel';
 import type { FormulationModel, ParticleModel } from './formulationModel';
+import type { RequirementModel } from './requirementModel';
 
 function surfacePotential(particle: ParticleModel, medium: MediumState): number | null {
   if (particle.charge === null || medium.debyeLength_m === null) return null;

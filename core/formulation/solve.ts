@@ -1,8 +1,8 @@
 import { lnStabilityRatio } from '../coagulation/stabilityRatio';
 import type { CurveFeatures } from '../evaluation';
 import { findFeatures } from '../pairEnergy/curveFeatures';
-import { separationGrid } from '../pairEnergy/separationGrid';
 import { totalEnergy } from '../pairEnergy/pairForces';
+import { separationGrid } from '../pairEnergy/separationGrid';
 import { done, type Result } from '../problem';
 import type { Formulation } from '../scenario/scenario';
 import { type FormulationModel, formulationModel } from './formulationModel';

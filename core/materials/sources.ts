@@ -51,6 +51,10 @@ export const sources: readonly Source[] = [
     key: 'DeVore1951',
     citation: 'DeVore, Refractive indices of rutile and sphalerite, J. Opt. Soc. Am. 41 (1951) 416.',
   },
+  {
+    key: 'Din38409',
+    citation: 'DIN 38409-6, German standard methods for the examination of water: hardness of water, 1986.',
+  },
   { key: 'DjurisicLi1999', citation: 'Djurišić & Li, Optical properties of graphite, J. Appl. Phys. 85 (1999) 7404.' },
   {
     key: 'Faure2011',

@@ -18,7 +18,8 @@ const DIVISOR_K = 233;
  *     η^(−0.2661) = η_ref^(−0.2661) + (T − T_ref)/233,  η in mPa s, T in K
  *
  * Source  Lewis & Squires 1934, in the form of Reid, Prausnitz & Poling 1987, chapter 9 (from memory).
- * Valid   at or above the reference temperature, below boiling; 5–15 % as its users report, see the published test.
+ * Valid   at or above the reference temperature, below boiling; 5–15 % as its users report; against
+ *         handbook values glycols are off by 25–45 %, see the test.
  *         Downwards it diverges for thick liquids: there {@link andrade} takes over with the same slope.
  * Throws  RangeError below the reference temperature, or for a non-positive input.
  */

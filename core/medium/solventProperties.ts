@@ -127,7 +127,7 @@ export function componentViscosity(material: Material, temperature_K: number): P
     caveats: [
       {
         code: `viscosity-temperature-${material.id}`,
-        message: `The viscosity of ${material.name} is moved from ${degrees(reference_K)} to ${degrees(temperature_K)} by a general curve: expect ±15 %, up to ±30 % for oils, glycols and cold storage.`,
+        message: `The viscosity of ${material.name} is moved from ${degrees(reference_K)} to ${degrees(temperature_K)} by a general curve: expect ±15 %, for glycols, oils and cold storage up to ±45 %.`,
       },
     ],
   };

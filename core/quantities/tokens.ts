@@ -70,12 +70,14 @@ const quoted = (text: string): string => `"${text.length > 30 ? `${text.slice(0,
 
 function unknownUnit(text: string, at: number): Stumble {
   const word = /^[\p{L}°%‰][^\s()+*]*/u.exec(text.slice(at))?.[0] ?? text.slice(at);
-  const near = units.find((unit) => unit.spellings.some((one) => one.toLowerCase() === word.toLowerCase()));
+  const near = units.filter((unit) => unit.spellings.some((one) => one.toLowerCase() === word.toLowerCase()));
   return {
     code: 'unknown-unit',
     message: `The unit ${quoted(word)} is not known here.`,
     remedy:
-      near === undefined ? 'Use another unit, or the one beside the field.' : `Write ${near.symbol} if that is meant.`,
+      near.length === 0
+        ? 'Use another unit, or the one beside the field.'
+        : `Write ${near.map(({ symbol }) => symbol).join(' or ')} if that is meant.`,
   };
 }
 

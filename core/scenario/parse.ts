@@ -13,9 +13,9 @@ import {
   type Particle,
   type ParticleCharge,
   type Requirement,
+  type SaltDose,
   SCENARIO_FORMAT,
   SCENARIO_SCHEMA,
-  type SaltDose,
   type Scenario,
 } from './scenario';
 

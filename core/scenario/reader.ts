@@ -34,7 +34,13 @@ export const group =
   <T extends object>(what: string, fields: Fields<T>): Reader<T> =>
   (value, at, reading) => {
     if (typeof value !== 'object' || value === null || Array.isArray(value)) {
-      return note(reading, 'not-a-group', at, `Here ${what} is expected, but ${shown(value)} was found.`, 'Compare with a file saved by Sunder.');
+      return note(
+        reading,
+        'not-a-group',
+        at,
+        `Here ${what} is expected, but ${shown(value)} was found.`,
+        'Compare with a file saved by Sunder.',
+      );
     }
     const before = reading.problems.length;
     const entries = new Map(Object.entries(value));
@@ -42,7 +48,13 @@ export const group =
     for (const key of Object.keys(fields) as (keyof T & string)[]) {
       const place = pointerTo(at, key);
       if (!entries.has(key)) {
-        note(reading, 'missing', place, `The entry "${key}" is missing from ${what}.`, 'Add it, or open the file in Sunder’s own format.');
+        note(
+          reading,
+          'missing',
+          place,
+          `The entry "${key}" is missing from ${what}.`,
+          'Add it, or open the file in Sunder’s own format.',
+        );
         continue;
       }
       const entry = fields[key](entries.get(key), place, reading);
@@ -50,7 +62,13 @@ export const group =
       entries.delete(key);
     }
     for (const key of entries.keys()) {
-      note(reading, 'unknown-entry', pointerTo(at, key), `The entry "${key}" is not known in ${what}.`, 'Correct its spelling or remove it.');
+      note(
+        reading,
+        'unknown-entry',
+        pointerTo(at, key),
+        `The entry "${key}" is not known in ${what}.`,
+        'Correct its spelling or remove it.',
+      );
     }
     return reading.problems.length === before ? (read as T) : undefined;
   };
@@ -59,7 +77,13 @@ export const list =
   <T>(what: string, item: Reader<T>, count: { readonly min: number; readonly max: number }): Reader<readonly T[]> =>
   (value, at, reading) => {
     if (!Array.isArray(value)) {
-      return note(reading, 'not-a-list', at, `A list of ${what} is expected, but ${shown(value)} was found.`, 'Put the entries between square brackets.');
+      return note(
+        reading,
+        'not-a-list',
+        at,
+        `A list of ${what} is expected, but ${shown(value)} was found.`,
+        'Put the entries between square brackets.',
+      );
     }
     if (value.length < count.min || value.length > count.max) {
       return note(
@@ -91,14 +115,32 @@ export const text =
   (maxLength: number, minLength = 0): Reader<string> =>
   (value, at, reading) => {
     if (typeof value !== 'string') {
-      return note(reading, 'not-text', at, `Text is expected, but ${shown(value)} was found.`, 'Put the text between double quotes.');
+      return note(
+        reading,
+        'not-text',
+        at,
+        `Text is expected, but ${shown(value)} was found.`,
+        'Put the text between double quotes.',
+      );
     }
     if (value.length > maxLength || value.length < minLength) {
-      return note(reading, 'wrong-length', at, `Text of ${minLength} to ${maxLength} characters is expected, but it has ${value.length}.`, 'Change its length.');
+      return note(
+        reading,
+        'wrong-length',
+        at,
+        `Text of ${minLength} to ${maxLength} characters is expected, but it has ${value.length}.`,
+        'Change its length.',
+      );
     }
     for (const character of value) {
       if (isDisguise(character.codePointAt(0) ?? 0)) {
-        return note(reading, 'control-character', at, 'The text holds an invisible control character.', 'Type the text anew.');
+        return note(
+          reading,
+          'control-character',
+          at,
+          'The text holds an invisible control character.',
+          'Type the text anew.',
+        );
       }
     }
     return value;
@@ -108,7 +150,13 @@ export const oneOf =
   <T extends string>(choices: readonly T[]): Reader<T> =>
   (value, at, reading) =>
     choices.find((choice) => choice === value) ??
-    note(reading, 'not-a-choice', at, `One of ${choices.map((c) => `"${c}"`).join(', ')} is expected, but ${shown(value)} was found.`, 'Use one of these words.');
+    note(
+      reading,
+      'not-a-choice',
+      at,
+      `One of ${choices.map((c) => `"${c}"`).join(', ')} is expected, but ${shown(value)} was found.`,
+      'Use one of these words.',
+    );
 
 export const orNull =
   <T>(reader: Reader<T>): Reader<T | null> =>
@@ -126,10 +174,22 @@ export const number =
   (value, at, reading) => {
     const range = `${limits.min} to ${limits.max}${limits.unit === '' ? '' : ` ${limits.unit}`}`;
     if (typeof value !== 'number' || !Number.isFinite(value)) {
-      return note(reading, 'not-a-number', at, `A number from ${range} is expected, but ${typeof value === 'number' ? 'the number is too large' : `${shown(value)} was found`}.`, 'Enter a number without a unit; the unit stands in the name of the entry.');
+      return note(
+        reading,
+        'not-a-number',
+        at,
+        `A number from ${range} is expected, but ${typeof value === 'number' ? 'the number is too large' : `${shown(value)} was found`}.`,
+        'Enter a number without a unit; the unit stands in the name of the entry.',
+      );
     }
     if (value < limits.min || value > limits.max) {
-      return note(reading, 'out-of-range', at, `A number from ${range} is expected, but ${value} was found.`, 'Check the value and its unit.');
+      return note(
+        reading,
+        'out-of-range',
+        at,
+        `A number from ${range} is expected, but ${value} was found.`,
+        'Check the value and its unit.',
+      );
     }
     return value === 0 ? 0 : value;
   };
@@ -140,4 +200,10 @@ export const keyOf =
   (value, at, reading) =>
     typeof value === 'string' && exists(value)
       ? value
-      : note(reading, 'unknown-name', at, `${shown(value)} is not ${what} that Sunder knows.`, 'Choose one from the list in the window, or check its spelling.');
+      : note(
+          reading,
+          'unknown-name',
+          at,
+          `${shown(value)} is not ${what} that Sunder knows.`,
+          'Choose one from the list in the window, or check its spelling.',
+        );

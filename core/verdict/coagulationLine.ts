@@ -14,8 +14,9 @@ export interface CoagulationCase {
 }
 
 /** Decades of the stability ratio above what the shelf life asks for. */
-export const coagulationMargin = (rates: Pick<PairRates, 'log10StabilityRatio' | 'requiredLog10StabilityRatio'>): number =>
-  rates.log10StabilityRatio - rates.requiredLog10StabilityRatio;
+export const coagulationMargin = (
+  rates: Pick<PairRates, 'log10StabilityRatio' | 'requiredLog10StabilityRatio'>,
+): number => rates.log10StabilityRatio - rates.requiredLog10StabilityRatio;
 
 function statement({ pair, rates, doubt }: CoagulationCase): string {
   const { barrier, contact_m } = pair.features;

@@ -182,7 +182,11 @@ export function leversFor(inputs: readonly LimitInput[], question: LeverQuestion
 }
 
 /** `Holds below 35 mM salt (now 12 mM; zeta held)`, or that no value turns the answer. */
-export function limitSentence(lever: LimitLever, found: { value: number; holds: 'above' | 'below' } | null, holdsNow: boolean): string {
+export function limitSentence(
+  lever: LimitLever,
+  found: { value: number; holds: 'above' | 'below' } | null,
+  holdsNow: boolean,
+): string {
   const { name, unit, now, from, to, proviso } = lever;
   const range = `${number(from)} to ${number(to)} ${unit}`;
   if (found === null) {

@@ -1,6 +1,6 @@
 import type { Limit, SettlingState, VerdictLine } from '../evaluation';
-import { levelOf } from './level';
 import type { RequirementModel } from '../formulation/requirementModel';
+import { levelOf } from './level';
 import { number, timeSpan } from './words';
 
 export const SETTLING_LEVERS = ['viscosity', 'diameter'] as const;
@@ -24,9 +24,7 @@ const DAYS_PER_CENTURY = 36_525;
 const LONGEST_days = 1000 * DAYS_PER_CENTURY;
 
 export const settlingTime_days = (settling: SettlingState, requirement: RequirementModel): number =>
-  staysSuspended(settling, requirement)
-    ? LONGEST_days
-    : Math.min(LONGEST_days, settling.timeToClear_s / S_PER_DAY);
+  staysSuspended(settling, requirement) ? LONGEST_days : Math.min(LONGEST_days, settling.timeToClear_s / S_PER_DAY);
 
 /** Brownian motion alone keeps the particles spread over the whole height. */
 const staysSuspended = (settling: SettlingState, requirement: RequirementModel): boolean =>

@@ -3,6 +3,7 @@ import { wellOccupation } from '../coagulation/wellOccupation';
 import type { PairEvaluation, ParticleState, Verdict } from '../evaluation';
 import type { PairDoubt } from '../formulation/doubt';
 import { particleState } from '../formulation/particleState';
+import type { RequirementModel } from '../formulation/requirementModel';
 import { type SolvedFormulation, type SolvedPair, solve } from '../formulation/solve';
 import type { Formulation } from '../scenario/scenario';
 import { COAGULATION_LEVERS, coagulationLine, coagulationMargin } from './coagulationLine';
@@ -10,7 +11,6 @@ import { findLimits } from './findLimits';
 import { FLOCCULATION_LEVERS, flocculationLine, flocculationMargin } from './flocculationLine';
 import { worstOf } from './level';
 import { notConsidered } from './notConsidered';
-import type { RequirementModel } from '../formulation/requirementModel';
 import { SETTLING_LEVERS, settlingLine, settlingMargin } from './settlingLine';
 
 export interface VerdictQuestion {
@@ -60,9 +60,7 @@ export function verdict(question: VerdictQuestion): Verdict {
       COAGULATION_LEVERS,
       lever(kindsOf(weakest)),
       marginOf((changed) =>
-        Math.min(
-          ...changed.pairs.map((pair) => coagulationMargin(pairRates({ solved: changed, pair, requirement }))),
-        ),
+        Math.min(...changed.pairs.map((pair) => coagulationMargin(pairRates({ solved: changed, pair, requirement })))),
       ),
     ),
   });

@@ -29,7 +29,11 @@ async function textOf(path: string): Promise<string | number> {
       return fault('not-utf8', 'The file is not UTF-8 text.', 'Save it as UTF-8.');
     }
     const { code } = error as NodeJS.ErrnoException;
-    return fault('unreadable', `"${path}" cannot be read (${code ?? 'unknown fault'}).`, 'Check the name and the rights.');
+    return fault(
+      'unreadable',
+      `"${path}" cannot be read (${code ?? 'unknown fault'}).`,
+      'Check the name and the rights.',
+    );
   }
 }
 

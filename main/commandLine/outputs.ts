@@ -1,9 +1,9 @@
-import packageFacts from '../../package.json';
 import type { Evaluation } from '../../core/evaluation';
 import { CAUTION } from '../../core/report/caution';
 import { comparisonColumns, comparisonRow } from '../../core/report/comparison';
 import { delimited } from '../../core/report/delimited';
 import type { Scenario } from '../../core/scenario/scenario';
+import packageFacts from '../../package.json';
 
 export interface OutputChoice {
   readonly curves: boolean;

@@ -238,6 +238,15 @@ describe('readQuantity explains a slip', () => {
   });
 });
 
+describe('readQuantity suggests the unit that was meant', () => {
+  it.each([
+    ['5 NM', 'Write nm if that is meant.'],
+    ['5 MM', 'Write mm or mM if that is meant.'],
+  ])('%s', (typed, remedy) => {
+    expect(problemOf(typed, 'diameter_nm')?.remedy).toBe(remedy);
+  });
+});
+
 describe('readQuantity keeps hostile text out', () => {
   const hostile: readonly string[] = [
     'config({number:"BigNumber"})',
