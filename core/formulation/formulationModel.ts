@@ -5,6 +5,7 @@ import type { MediumState } from '../evaluation';
 import { findMaterial } from '../materials/catalogue';
 import type { Material } from '../materials/material';
 import { mediumState } from '../medium/mediumState';
+import { viscosityIsKnown } from '../medium/mediumViscosity';
 import { done, type Problem, type Result, refused } from '../problem';
 import { K_from_degC, kg_m2_from_mg_m2, kg_mol_from_g_mol, m_from_nm, V_from_mV } from '../quantities/convert';
 import type { Formulation, Particle } from '../scenario/scenario';
@@ -122,6 +123,14 @@ function problemsOf(formulation: Formulation, medium: MediumState, solids: numbe
 
 /** Converts once, at the door. Problems carry pointers within the formulation; the caller puts its own in front. */
 export function formulationModel(formulation: Formulation): Result<FormulationModel> {
+  if (!viscosityIsKnown(formulation.medium)) {
+    return refused({
+      code: 'viscosity-unknown',
+      at: '/medium/measuredViscosity_mPa_s',
+      message: 'No component of the medium has a viscosity in the catalogue.',
+      remedy: 'Enter the measured viscosity of the medium.',
+    });
+  }
   const temperature_K = K_from_degC(formulation.temperature_degC);
   const { state, volumeFractions, caveats } = mediumState({
     recipe: formulation.medium,

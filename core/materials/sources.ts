@@ -7,6 +7,11 @@ export interface Source {
 /** Every source that a number in core/ or test/published/ refers to, once, in alphabetical order of the key. */
 export const sources: readonly Source[] = [
   {
+    key: 'Akerlof1932',
+    citation:
+      'Åkerlöf, Dielectric constants of some organic solvent–water mixtures at various temperatures, J. Am. Chem. Soc. 54 (1932) 4125.',
+  },
+  {
     key: 'AtomicWeights',
     citation: 'Prohaska et al., Standard atomic weights of the elements 2021, Pure Appl. Chem. 94 (2022) 573.',
   },
@@ -144,7 +149,6 @@ export const sources: readonly Source[] = [
     key: 'Philipp1973',
     citation: 'Philipp, Optical properties of silicon nitride, J. Electrochem. Soc. 120 (1973) 295.',
   },
-  { key: 'Querry1985', citation: 'Querry, Optical constants, Contractor Report CRDC-CR-85034 (1985).' },
   {
     key: 'Rheims1997',
     citation:

@@ -6,9 +6,10 @@ import { ionCaveats } from './ionCaveats';
 import { ionsOf } from './ionsOf';
 import { looyenga } from './looyenga';
 import { lorentzLorenz } from './lorentzLorenz';
+import { type MediumShare, mediumShares } from './mediumShares';
 import { mediumViscosity } from './mediumViscosity';
 import { componentDensity, componentPermittivity, type Property } from './solventProperties';
-import { type MediumShare, volumeFractions } from './volumeFractions';
+import { volumeFractions } from './volumeFractions';
 
 /** The medium without what double-layer theory makes of it. */
 export type MediumWithoutScreening = Omit<MediumState, 'debyeLength_m' | 'bjerrumLength_m'>;
@@ -29,7 +30,8 @@ function mediumPermittivity(shares: readonly MediumShare[], temperature_K: numbe
   if (shares.length > 1) {
     caveats.push({
       code: 'permittivity-mixing',
-      message: 'The permittivity of the mixture is estimated from its components: expect ±10 %.',
+      message:
+        'The permittivity of the mixture is estimated from its components: expect ±10 %; alcohols and glycols in water come out about a tenth too low.',
     });
   }
   return { value, caveats };
@@ -71,10 +73,12 @@ const measuredOr = (measured: number | null, computed: () => Property): Property
  */
 export function mediumState({ recipe, temperature_degC, salts, hardness_dH, pH }: MediumInput): {
   readonly state: MediumWithoutScreening;
+  /** In the order of the recipe; they add up to one. */
+  readonly volumeFractions: readonly number[];
   readonly caveats: readonly Caveat[];
 } {
   const temperature_K = K_from_degC(temperature_degC);
-  const shares = volumeFractions(recipe);
+  const shares = mediumShares(recipe);
   const { measuredRelativePermittivity, measuredViscosity_mPa_s, measuredDensity_kg_m3 } = recipe;
 
   const permittivity = measuredOr(measuredRelativePermittivity, () => mediumPermittivity(shares, temperature_K));
@@ -101,6 +105,7 @@ export function mediumState({ recipe, temperature_degC, salts, hardness_dH, pH }
       measured,
       ...found,
     },
+    volumeFractions: volumeFractions(recipe),
     caveats: [
       ...permittivity.caveats,
       ...viscosity.caveats,

@@ -1,16 +1,14 @@
 import type { MediumRecipe } from '../scenario/scenario';
 import type { Caveat } from '../validity';
 import { grunbergNissan } from './grunbergNissan';
+import { type MediumShare, mediumShares } from './mediumShares';
 import { componentDensity, componentViscosity, type Property } from './solventProperties';
-import { type MediumShare, volumeFractions } from './volumeFractions';
 
 /** False when only a measurement can tell the viscosity: no component has one (resins alone). To be asked at the door. */
 export function viscosityIsKnown(recipe: MediumRecipe): boolean {
   return (
     recipe.measuredViscosity_mPa_s !== null ||
-    volumeFractions(recipe).some(
-      ({ material }) => material.viscosity_Pa_s !== null && material.molarMass_kg_mol !== null,
-    )
+    mediumShares(recipe).some(({ material }) => material.viscosity_Pa_s !== null && material.molarMass_kg_mol !== null)
   );
 }
 

@@ -47,9 +47,14 @@ const dimensionless = new Set([
   ...['relativeUncertainty', 'acrossVacuum', 'acrossLiquid', 'kappaRadius', 'pecletNumber'],
   ...['lnStabilityRatio', 'log10StabilityRatio', 'requiredLog10StabilityRatio', 'standardUncertaintyLog10W'],
   ...['log10HalfLife_s'], // a logarithm, of the unit named
+  ...['permittivity', 'mediumPermittivity', 'measuredRelativePermittivity', 'polarizabilityDensity', 'hamakerScale'],
+  ...['fraction', 'share', 'pairedShare', 'hamakerShare', 'solids', 'acceptedLoss', 'acceptedClearLayer'],
+  ...['log10WDown', 'log10WUp', 'x', 'q', 'rest'], // arguments of pure functions: the trilogarithm, 1 − q
+  ...['pairIndex', 'kinds', 'digits', 'maxLength'],
+  ...['reducedPotential', 'kappaGap', 'kappaRadiusSmaller', 'saturation'],
   ...['perFormula', 'form', 'first', 'second', 'weakestPair', 'schema', 'index', 'count', 'length'],
   // a number whose unit stands beside it, or is that of the span or table it belongs to
-  ...['value', 'from', 'to', 'min', 'max', 'actual', 'needed', 'margin'],
+  ...['value', 'from', 'to', 'min', 'max', 'actual', 'needed', 'margin', 'current', 'downwardDoubt', 'upwardDoubt'],
 ]);
 
 const hasUnit = (name: string): boolean => units.some((unit) => name.endsWith(`_${unit}`));

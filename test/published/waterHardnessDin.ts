@@ -1,4 +1,4 @@
-/** German degree of hardness as defined in DIN 38409-6; from memory, as quoted in the trade to four digits. */
+/** German degree of hardness as defined in DIN 38409-6 (1986); from memory, as quoted in the trade to four digits. */
 export const germanDegree = {
   source: 'Din38409',
   where: 'definition of the degree',

@@ -13,6 +13,14 @@ const doses = fc.array(dose, { maxLength: 5 });
 const hardness = fc.double({ min: 0, max: 60, noNaN: true });
 const acidity = fc.option(fc.double({ min: 0, max: 14, noNaN: true }), { nil: null });
 
+const idsInUse = `generic-1-1 generic-2-1 generic-1-2 generic-2-2 generic-3-1 sodium-chloride potassium-chloride
+  lithium-chloride ammonium-chloride sodium-nitrate potassium-nitrate calcium-chloride magnesium-chloride
+  barium-chloride zinc-chloride calcium-nitrate magnesium-sulfate sodium-sulfate potassium-sulfate
+  aluminium-chloride lanthanum-nitrate sodium-bicarbonate sodium-carbonate trisodium-phosphate sodium-citrate
+  tetrasodium-pyrophosphate sodium-tripolyphosphate sodium-acetate sodium-polyacrylate ammonium-polyacrylate
+  hydrochloric-acid nitric-acid acetic-acid sodium-hydroxide potassium-hydroxide ammonia amp
+  dimethylethanolamine triethanolamine triethylamine`;
+
 const concentration = (found: ReturnType<typeof ionsOf>, name: string): number =>
   found.ions.find((ion) => ion.name === name)?.concentration_mol_m3 ?? 0;
 
@@ -91,6 +99,10 @@ describe('every salt as written', () => {
       return sum + ionSpeciesOf(species).forms[form].valence * perFormula;
     }, 0);
     expect(charge).toBe(0);
+  });
+
+  it.each(idsInUse.split(/\s+/))('the id %s, stored in files, is still there', (id) => {
+    expect(findSalt(id)?.id).toBe(id);
   });
 
   it('has an id of its own, in kebab case', () => {

@@ -1,11 +1,13 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { materials } from '../../../core/materials/catalogue';
+import { mediumShares } from '../../../core/medium/mediumShares';
 import { type MediumInput, mediumState } from '../../../core/medium/mediumState';
 import { viscosityIsKnown } from '../../../core/medium/mediumViscosity';
 import { salts } from '../../../core/medium/salts';
 import { volumeFractions } from '../../../core/medium/volumeFractions';
 import type { MediumRecipe } from '../../../core/scenario/scenario';
+import { permittivityOfMixtures, viscosityOfMixtures } from '../../published/waterEthanol';
 
 const recipe = (parts: Readonly<Record<string, number>>, measured: Partial<MediumRecipe> = {}): MediumRecipe => ({
   components: Object.entries(parts).map(([material, volumeParts]) => ({ material, volumeParts })),
@@ -83,25 +85,53 @@ describe('mixtures', () => {
   });
 });
 
-describe('volumeFractions', () => {
-  it('adds up to one, without empty components, the same material once', () => {
-    const shares = volumeFractions({
-      ...recipe({}),
-      components: [
-        { material: 'water', volumeParts: 2 },
-        { material: 'ethanol', volumeParts: 0 },
-        { material: 'glycerol', volumeParts: 1 },
-        { material: 'water', volumeParts: 1 },
-      ],
-    });
-    expect(shares.map(({ material, volumeFraction }) => [material.id, volumeFraction])).toEqual([
+describe('mixing rules against aqueous ethanol at 25 °C (from memory): what the caveats promise', () => {
+  /** Parts by volume before mixing, from parts by mass. */
+  const byMass = (ethanol_percent: number) =>
+    input(recipe({ ethanol: ethanol_percent / 785.9, water: (100 - ethanol_percent) / 997.05 }), { pH: 7 });
+
+  it.each(permittivityOfMixtures.rows)('$ethanol_percent %: about a tenth below $relativePermittivity', (row) => {
+    const ratio = mediumState(byMass(row.ethanol_percent)).state.relativePermittivity / row.relativePermittivity;
+    expect(ratio).toBeGreaterThan(0.87);
+    expect(ratio).toBeLessThan(1);
+  });
+
+  it.each(viscosityOfMixtures.rows)(
+    '$ethanol_percent %: two to three times thinner than $viscosity_mPa_s mPa s',
+    (row) => {
+      const thicker = row.viscosity_mPa_s / 1000 / mediumState(byMass(row.ethanol_percent)).state.viscosity_Pa_s;
+      expect(thicker).toBeGreaterThan(2);
+      expect(thicker).toBeLessThan(3);
+    },
+  );
+});
+
+describe('what a medium holds', () => {
+  const twiceWater: MediumRecipe = {
+    ...recipe({}),
+    components: [
+      { material: 'water', volumeParts: 2 },
+      { material: 'ethanol', volumeParts: 0 },
+      { material: 'glycerol', volumeParts: 1 },
+      { material: 'water', volumeParts: 1 },
+    ],
+  };
+
+  it('volumeFractions keeps the order of the recipe and adds up to one', () => {
+    expect(volumeFractions(twiceWater)).toEqual([0.5, 0, 0.25, 0.25]);
+    expect(mediumState(input(twiceWater)).volumeFractions).toEqual([0.5, 0, 0.25, 0.25]);
+  });
+
+  it('mediumShares leaves out what is not there and counts a material once', () => {
+    const shares = mediumShares(twiceWater).map(({ material, volumeFraction }) => [material.id, volumeFraction]);
+    expect(shares).toEqual([
       ['water', 0.75],
       ['glycerol', 0.25],
     ]);
   });
 
   it('refuses an unknown material, negative parts and nothing at all', () => {
-    expect(() => volumeFractions(recipe({ unobtainium: 1 }))).toThrow(/unobtainium/);
+    expect(() => mediumShares(recipe({ unobtainium: 1 }))).toThrow(/unobtainium/);
     expect(() => volumeFractions(recipe({ water: -1 }))).toThrow(/volumeParts/);
     expect(() => volumeFractions(recipe({ water: 0 }))).toThrow(/totalParts/);
   });
