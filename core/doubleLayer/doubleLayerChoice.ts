@@ -28,9 +28,6 @@ export interface DoubleLayerChoice {
 
 /** Below this κa the flat-surface geometry of the linear models is out of the question: Bell, Levine & McCartney 1970. */
 const CURVED_BELOW = 5;
-/** Below this κa the curvature correction itself is off by more than 10 % at high potentials (measured on solved spheres). */
-const VERY_CURVED_BELOW = 1;
-
 function byValidity({ potential1_V, potential2_V, kappaRadiusSmaller, temperature_K }: ChargedPair) {
   const linear = doubleLayerValidity['constant-potential'];
   const limit_V = linear.reducedPotential.to * thermalVoltage(temperature_K);
@@ -65,10 +62,10 @@ function caveatsOf(model: DoubleLayerModel, pair: ChargedPair): Caveat[] {
     code: 'double-layer-model-range',
     message: `${message} It was chosen by hand and is used as asked.`,
   }));
-  if (model === 'superposition' && pair.kappaRadiusSmaller < VERY_CURVED_BELOW) {
+  if (model === 'superposition' && pair.kappaRadiusSmaller < CURVED_BELOW) {
     caveats.push({
       code: 'double-layer-curvature',
-      message: `The smaller particle has a radius of only ${pair.kappaRadiusSmaller.toPrecision(2)} Debye lengths. The curvature of its double layer is corrected with a formula made for larger particles and for salts like NaCl: the repulsion may be off by tens of per cent.`,
+      message: `The smaller particle has a radius of only ${pair.kappaRadiusSmaller.toPrecision(2)} Debye lengths. The curvature of its double layer is counted with a formula for salts like NaCl, good to a few per cent; where calcium, sulphate or other ions of several charges make up most of the salt, the repulsion may be off by up to a third.`,
     });
   }
   return caveats;

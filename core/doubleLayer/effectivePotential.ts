@@ -94,8 +94,8 @@ function logFarPotential(ions: readonly Ion[], height: number, sign: number): { 
  * the pole at y = 0 taken out in closed form. For z:z this is (4kT/ze) tanh(zeψ/4kT). A surface whose counter-ions carry
  * two charges has a far smaller Ψ than its opposite in the same salt.
  *
- * Source  Gouy, J. Phys. 9 (1910) 457, and Chapman 1913 (from memory); our own quadrature, checked with 30 digits against
- *         mpmath and the closed form for 2:1: relative error below 1e-12.
+ * Source  Gouy, J. Phys. 9 (1910) 457, and Chapman 1913 (from memory); our own quadrature, within 1e-13 of a 45-digit
+ *         quadrature and of the closed form for 2:1.
  * Valid   point ions of a neutral bulk.
  * Throws  RangeError when the ions are none or not neutral, for a non-finite potential, or a temperature not above zero.
  */
@@ -123,7 +123,7 @@ export function flatEffectivePotential({ ions, potential_V, temperature_K }: Sur
  * The flat surface's, times the curvature factor of the symmetric salt: see {@link curvatureFactor}.
  *
  * Source, Throws as {@link flatEffectivePotential}.
- * Valid   exact for large κa; for κa of a few see the deviations from the solved sphere in the tests.
+ * Valid   exact for large κa; for the deviations at small κa see {@link curvatureFactor}.
  */
 export function sphereEffectivePotential({
   kappaRadius,

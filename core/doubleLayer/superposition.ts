@@ -37,7 +37,7 @@ export function superposedEnergy(spheres: EffectiveSpheres): number {
  *     Y = 8 tanh(y/4) / ( 1 + [1 − (2κa+1)/(κa+1)² tanh²(y/4)]^½ ),   y = zeψ/kT
  *
  * Source  Bell, Levine & McCartney, J. Colloid Interface Sci. 33 (1970) 335 (from memory).
- * Valid   κh above 1, κa above about 1, symmetric salt. Other salts: effectivePotential.ts with {@link superposedEnergy}.
+ * Valid   κh above 1, symmetric salt; κa as in {@link curvatureFactor}. Other salts: effectivePotential.ts with {@link superposedEnergy}.
  * Throws  RangeError for a non-finite potential, or another input that is not positive.
  */
 export function superpositionEnergy(spheres: ChargedSpheresInSalt): number {

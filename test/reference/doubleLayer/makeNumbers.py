@@ -61,7 +61,9 @@ def bell_levine_mccartney(y, kappa_a):
 
 
 def sphere(ions, y0, kappa_a):
-    """Effective reduced potential of a sphere: the equation solved inwards from the far field, its height found by bisection.
+    """Effective reduced potential of a sphere and the field at its surface, in units of kappa kT/e.
+
+    The equation is solved inwards from the far field, whose height is found by bracketing.
 
     x = kappa (r - a); y = Y kappa_a/(kappa_a + x) exp(-x) far out.
     """
@@ -78,13 +80,14 @@ def sphere(ions, y0, kappa_a):
         stop = lambda x, s: abs(s[0]) - 40
         stop.terminal = True
         s = solve_ivp(right, (start, 0), [y, dy], method='DOP853', rtol=1e-12, atol=1e-18, events=stop)
-        return s.y[0, -1] if s.status == 0 else np.sign(far) * 40
+        return (s.y[0, -1], -s.y[1, -1]) if s.status == 0 else (np.sign(far) * 40, np.sign(far) * np.inf)
 
     target = float(y0)
     low, high = 1e-3 * target, target
-    while abs(surface(high)) < abs(target):
+    while abs(surface(high)[0]) < abs(target):
         high *= 2
-    return brentq(lambda far: surface(far) - target, low, high, rtol=1e-11)
+    far = brentq(lambda far: surface(far)[0] - target, low, high, rtol=1e-11)
+    return {'effectivePotential': far, 'field': surface(far)[1]}
 
 
 def like_plates(y0, kappa_h, held):
@@ -141,7 +144,7 @@ numbers = {
             'ions': [{'valence': z, 'concentration_mol_m3': number(mp.mpf(c))} for z, c in SALTS[name]],
             'reducedPotential': y,
             'kappaRadius': k,
-            'effectivePotential': sphere(SALTS[name], y, k),
+            **sphere(SALTS[name], y, k),
         }
         for name in ('1:1', '2:1', '1:2', 'sodium with calcium')
         for y in (1, -1, 2, -2, 4, -4)
