@@ -30,6 +30,15 @@ export function mustBeSpheres(where: string, spheres: Omit<ChargedSpheres, 'pote
   }
 }
 
+/** As {@link mustBeSpheres}, for the two potentials. */
+export function mustBePotentials(where: string, potential1_V: number, potential2_V: number): void {
+  if (!(Math.abs(potential1_V) + Math.abs(potential2_V) < Infinity)) {
+    throw new RangeError(
+      `${where}: potential1_V and potential2_V must be finite, got ${potential1_V}, ${potential2_V}`,
+    );
+  }
+}
+
 /** πε a₁a₂/(a₁+a₂) [F]: with it and squared potentials, Derjaguin's energy of two spheres. */
 export const derjaguinCapacity = (
   spheres: Pick<ChargedSpheres, 'radius1_m' | 'radius2_m' | 'relativePermittivity'>,

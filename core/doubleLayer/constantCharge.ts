@@ -1,5 +1,4 @@
-import { mustBeFinite } from '../validity';
-import { type ChargedSpheres, derjaguinCapacity, mustBeSpheres } from './chargedSpheres';
+import { type ChargedSpheres, derjaguinCapacity, mustBePotentials, mustBeSpheres } from './chargedSpheres';
 import { logOneMinusExp } from './logOneMinusExp';
 
 /**
@@ -18,7 +17,7 @@ import { logOneMinusExp } from './logOneMinusExp';
 export function constantChargeEnergy(spheres: ChargedSpheres): number {
   const { gap_m, potential1_V, potential2_V, inverseDebyeLength_per_m } = spheres;
   mustBeSpheres('constantChargeEnergy', spheres);
-  mustBeFinite('constantChargeEnergy', { potential1_V, potential2_V });
+  mustBePotentials('constantChargeEnergy', potential1_V, potential2_V);
   const kappaGap = inverseDebyeLength_per_m * gap_m;
   const alike = -4 * potential1_V * potential2_V * logOneMinusExp(kappaGap);
   const unlike = -((potential1_V - potential2_V) ** 2) * logOneMinusExp(2 * kappaGap);

@@ -45,42 +45,60 @@ function integral(of: (y: number) => number, from: number, to: number): number {
   const middle = (from + to) / 2;
   const half = (to - from) / 2;
   let sum = 0;
-  nodes.forEach((node, i) => {
-    sum += weights[i] * (of(middle - half * node) + of(middle + half * node));
-  });
+  for (let i = 0; i < nodes.length; i++) {
+    const step = half * nodes[i];
+    sum += weights[i] * (of(middle - step) + of(middle + step));
+  }
   return half * sum;
 }
 
 /** Below this reduced potential the integrand is written without its pole, above it the plain one is harmless. */
 const POLE = 1;
 /** 1/field below this adds nothing that a double can hold. */
-const SPENT = 1e-18;
+const SPENT = 1e-17;
+/** The integrand dies away as e^(−zy/2): the farther out, the coarser the panels may be. */
+const GROWTH = 1.2;
 
-/** ln of the effective potential: of the surface itself, and of the highest any surface of this sign can have. */
-function logFarPotential(ions: readonly Ion[], height: number, sign: number): { own: number; highest: number } {
-  const mirrored = ions.map((ion) => ({ ...ion, valence: sign * ion.valence }));
+/** One entry for each valence, as a surface of positive potential sees it. */
+function gathered(ions: readonly Ion[], sign: number): readonly Ion[] {
+  const byValence = new Map<number, number>();
+  for (const { valence, concentration_mol_m3 } of ions) {
+    byValence.set(sign * valence, (byValence.get(sign * valence) ?? 0) + concentration_mol_m3);
+  }
+  return [...byValence].map(([valence, concentration_mol_m3]) => ({ valence, concentration_mol_m3 }));
+}
+
+/** ln of the effective reduced potential: first of the surface itself, then of the highest any surface can have. */
+function logFarPotentials(ions: readonly Ion[], height: number) {
   const valences = ions.map(({ valence }) => valence);
   // The nearest zeros of the field in the complex plane lie about 2π/(z₊ + z₋) off the axis.
   const panel = 2 / Math.max(1, Math.max(...valences) - Math.min(...valences));
   const smooth = (y: number): number => {
-    const rate = fieldExcessOverPotential(mirrored, y);
+    const rate = fieldExcessOverPotential(ions, y);
     const root = Math.sqrt(1 + rate * y);
     return -rate / (root * (1 + root));
   };
-  const plain = (y: number): number => 1 / reducedField(mirrored, y);
-
-  const sumOver = (integrand: (y: number) => number, from: number, to: number): number => {
+  const plain = (y: number): number => 1 / reducedField(ions, y);
+  const nearPole = (from: number, to: number): number => {
     let sum = 0;
-    for (let low = from; low < to; low += panel) {
-      if (from === POLE && plain(low) < SPENT) break;
-      sum += integral(integrand, low, Math.min(low + panel, to));
+    for (let low = from; low < to; low += panel) sum += integral(smooth, low, Math.min(low + panel, to));
+    return sum;
+  };
+  const beyondPole = (from: number, to: number): number => {
+    let sum = 0;
+    let width = panel;
+    for (let low = from; low < to && plain(low) > SPENT; low += width, width *= GROWTH) {
+      sum += integral(plain, low, Math.min(low + width, to));
     }
     return sum;
   };
-  const logAtPole = Math.log(POLE) + sumOver(smooth, 0, POLE);
-  const highest = logAtPole + sumOver(plain, POLE, Infinity);
-  if (height > POLE) return { own: logAtPole + sumOver(plain, POLE, height), highest };
-  return { own: Math.log(height) + sumOver(smooth, 0, height), highest };
+  if (height > POLE) {
+    const own = Math.log(POLE) + nearPole(0, POLE) + beyondPole(POLE, height);
+    return [own, own + beyondPole(height, Infinity)] as const;
+  }
+  const shared = nearPole(0, height);
+  const toPole = Math.log(POLE) + nearPole(height, POLE);
+  return [Math.log(height) + shared, shared + toPole + beyondPole(POLE, Infinity)] as const;
 }
 
 /**
@@ -110,10 +128,10 @@ export function flatEffectivePotential({ ions, potential_V, temperature_K }: Sur
   const height = Math.abs(potential_V) / unit_V;
   if (height === 0) return { effectivePotential_V: 0, saturation: 0 };
   const sign = Math.sign(potential_V);
-  const { own, highest } = logFarPotential(ions, height, sign);
+  const [own, highest] = logFarPotentials(gathered(ions, sign), height);
   return {
     effectivePotential_V: sign * unit_V * Math.exp(own),
-    saturation: Math.min(1, Math.exp(own - highest)), // rounding may pass 1 in the last digit
+    saturation: Math.exp(own - highest),
   };
 }
 

@@ -8,8 +8,8 @@ import { thermalVoltage } from './thermalVoltage';
  *     V = 64πε a₁a₂/(a₁+a₂) (kT/ze)² γ₁γ₂ e^(−κh),   γ = tanh(zeψ/4kT)
  *
  * Source  Gregory, J. Colloid Interface Sci. 51 (1975) 44 (from memory).
- * Valid   any potential, symmetric z:z salt, κh above 1, κa above about 10, h ≪ a. The limit of
- *         {@link file://./superposition.ts} for large κa; kept to compare with.
+ * Valid   any potential, symmetric z:z salt, κh above 1, κa above about 10, h ≪ a: what superposition.ts becomes for large
+ *         κa. Kept to compare with.
  * Throws  RangeError for a non-finite potential, or another input that is not positive.
  */
 export function gregorySuperpositionEnergy(spheres: ChargedSpheresInSalt): number {

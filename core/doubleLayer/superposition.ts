@@ -1,6 +1,6 @@
 import { VACUUM_PERMITTIVITY_F_m } from '../constants';
 import { mustBeFinite, mustBePositive } from '../validity';
-import { type ChargedSpheres, type ChargedSpheresInSalt, mustBeSpheres } from './chargedSpheres';
+import { type ChargedSpheres, type ChargedSpheresInSalt, mustBePotentials, mustBeSpheres } from './chargedSpheres';
 import { curvatureFactor } from './curvatureFactor';
 import { thermalVoltage } from './thermalVoltage';
 
@@ -23,7 +23,7 @@ export function superposedEnergy(spheres: EffectiveSpheres): number {
   const { gap_m, radius1_m, radius2_m, inverseDebyeLength_per_m, relativePermittivity } = spheres;
   const { effectivePotential1_V, effectivePotential2_V } = spheres;
   mustBeSpheres('superposedEnergy', spheres);
-  mustBeFinite('superposedEnergy', { effectivePotential1_V, effectivePotential2_V });
+  mustBePotentials('superposedEnergy', effectivePotential1_V, effectivePotential2_V);
   const permittivity_F_m = relativePermittivity * VACUUM_PERMITTIVITY_F_m;
   const size_m = radius1_m * (radius2_m / (radius1_m + radius2_m + gap_m));
   const fall = Math.exp(-inverseDebyeLength_per_m * gap_m);

@@ -1,4 +1,4 @@
-import { pairRates } from '../coagulation/pairRates';
+import { barrierCaveats } from '../doubleLayer/barrierCaveats';
 import { insideValidity } from '../doubleLayer/doubleLayerChoice';
 import type { DoubleLayerReport, PairEvaluation } from '../evaluation';
 import { findFeatures } from '../pairEnergy/curveFeatures';
@@ -8,6 +8,7 @@ import { doubleLayerModels, type Formulation } from '../scenario/scenario';
 import type { Caveat } from '../validity';
 import type { PairDoubt } from './doubt';
 import { pairModel } from './pairModel';
+import { pairRates } from './pairRates';
 import type { SolvedFormulation, SolvedPair } from './solve';
 
 /** Why no double layer acts, in words; empty when one does. */
@@ -44,16 +45,20 @@ function doubleLayerReport(formulation: Formulation, solved: SolvedFormulation, 
   return { model: doubleLayer.model, reason: doubleLayer.reason, alternatives };
 }
 
-function caveatsAtBarrier(report: DoubleLayerReport, pair: SolvedPair): Caveat[] {
-  const own = report.alternatives.find(({ model }) => model === report.model);
-  if (own === undefined || own.insideValidity || pair.features.barrier === null) return [];
-  const values = report.alternatives.map(({ barrier_kT }) => barrier_kT);
-  return [
-    {
-      code: 'double-layer-range',
-      message: `${own.note} The rival models put the barrier between ${Math.min(...values).toFixed(0)} and ${Math.max(...values).toFixed(0)} kT.`,
-    },
-  ];
+function caveatsAtBarrier(report: DoubleLayerReport, solved: SolvedFormulation, pair: SolvedPair): Caveat[] {
+  const { barrier } = pair.features;
+  const { first, second, doubleLayer } = pair.model;
+  const { debyeLength_m } = solved.model.medium;
+  if (barrier === null || doubleLayer === null || debyeLength_m === null) return [];
+  const rivals_kT = report.alternatives.map(({ barrier_kT }) => barrier_kT);
+  const spread = `The models put the barrier between ${Math.min(...rivals_kT).toFixed(0)} and ${Math.max(...rivals_kT).toFixed(0)} kT.`;
+  return barrierCaveats({
+    model: doubleLayer.model,
+    separation_m: barrier.separation_m,
+    slipPlane1_m: first.charge?.slipPlane_m ?? 0,
+    slipPlane2_m: second.charge?.slipPlane_m ?? 0,
+    debyeLength_m,
+  }).map((caveat) => ({ ...caveat, message: `${caveat.message} ${spread}` }));
 }
 
 /** Everything about one pair that is shown: curve, features, rates, rival models, doubt. */
@@ -77,6 +82,6 @@ export function pairEvaluation(
       rates: pairRates({ solved, pair, requirement }),
       barrierDoubt: doubt.barrier,
     },
-    caveats: [...pair.model.caveats, ...caveatsAtBarrier(doubleLayer, pair)],
+    caveats: [...pair.model.caveats, ...caveatsAtBarrier(doubleLayer, solved, pair)],
   };
 }

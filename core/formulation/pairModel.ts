@@ -8,7 +8,7 @@ import { J_from_zJ } from '../quantities/convert';
 import type { DoubleLayerModel, DoubleLayerModelChoice, Formulation } from '../scenario/scenario';
 import { prepareStericLayer } from '../stericLayer/stericEnergy';
 import type { Caveat } from '../validity';
-import { vanDerWaalsEnergy } from '../vanDerWaals/vanDerWaalsEnergy';
+import { prepareVanDerWaals } from '../vanDerWaals/vanDerWaalsEnergy';
 import type { FormulationModel, ParticleModel } from './formulationModel';
 import { rememberedHamakerReport } from './hamakerMemory';
 
@@ -106,7 +106,7 @@ export function pairModel(
         report.retardationWavelength_m,
         ...(medium.debyeLength_m === null || doubleLayer === null ? [] : [medium.debyeLength_m]),
       ],
-      vanDerWaals_J: (separation_m) => vanDerWaalsEnergy({ ...attraction, separation_m }),
+      vanDerWaals_J: prepareVanDerWaals(attraction),
       doubleLayer_J: doubleLayer?.energy ?? none,
       stericLayer_J: steric?.energy_J ?? none,
     },

@@ -33,21 +33,30 @@ export function pairIndices(kinds: number): readonly (readonly [number, number])
   return pairs;
 }
 
+/** Features and rate are worked out when first asked for: a limit search needs only one of them. */
 function solvePair(model: PairModel, first: number, second: number): SolvedPair {
   const energy_kT = totalEnergy(model.forces);
   const separation_m = separationGrid(model.forces);
+  let features: CurveFeatures | undefined;
+  let logRatio: number | undefined;
   return {
     first,
     second,
     model,
     separation_m,
-    features: findFeatures(energy_kT, separation_m),
-    lnStabilityRatio: lnStabilityRatio({
-      energy_kT,
-      radius1_m: model.first.radius_m,
-      radius2_m: model.second.radius_m,
-      contact_m: model.forces.contact_m,
-    }),
+    get features() {
+      features ??= findFeatures(energy_kT, separation_m);
+      return features;
+    },
+    get lnStabilityRatio() {
+      logRatio ??= lnStabilityRatio({
+        energy_kT,
+        radius1_m: model.first.radius_m,
+        radius2_m: model.second.radius_m,
+        contact_m: model.forces.contact_m,
+      });
+      return logRatio;
+    },
   };
 }
 

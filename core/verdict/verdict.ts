@@ -1,12 +1,13 @@
-import { pairRates } from '../coagulation/pairRates';
-import { wellOccupation } from '../coagulation/wellOccupation';
+import { pairedShare } from '../coagulation/wellOccupation';
 import type { PairEvaluation, ParticleState, Verdict } from '../evaluation';
 import type { PairDoubt } from '../formulation/doubt';
+import { coagulationMarginOf } from '../formulation/pairRates';
 import { particleState } from '../formulation/particleState';
 import type { RequirementModel } from '../formulation/requirementModel';
 import { type SolvedFormulation, type SolvedPair, solve } from '../formulation/solve';
+import { totalEnergy } from '../pairEnergy/pairForces';
 import type { Formulation } from '../scenario/scenario';
-import { COAGULATION_LEVERS, coagulationLine, coagulationMargin } from './coagulationLine';
+import { COAGULATION_LEVERS, coagulationLine } from './coagulationLine';
 import { findLimits } from './findLimits';
 import { FLOCCULATION_LEVERS, flocculationLine, flocculationMargin } from './flocculationLine';
 import { worstOf } from './level';
@@ -25,6 +26,19 @@ export interface VerdictQuestion {
 }
 
 const kindsOf = ({ first, second }: SolvedPair): readonly number[] => [first, second];
+
+/** null for unlike particles, and where no barrier keeps the well apart from contact. */
+function shareInPairs({ model, features, separation_m, first, second }: SolvedPair): number | null {
+  const { barrier, outerMinimum } = features;
+  if (first !== second || barrier === null || outerMinimum === null) return null;
+  return pairedShare({
+    energy_kT: totalEnergy(model.forces),
+    radius_m: model.first.radius_m,
+    from_m: barrier.separation_m,
+    to_m: separation_m[separation_m.length - 1],
+    numberDensity_per_m3: model.first.numberDensity_per_m3,
+  });
+}
 
 /** The pair whose reachable well is deepest. */
 const deepestWell = (pairs: readonly SolvedPair[]): number => {
@@ -60,7 +74,7 @@ export function verdict(question: VerdictQuestion): Verdict {
       COAGULATION_LEVERS,
       lever(kindsOf(weakest)),
       marginOf((changed) =>
-        Math.min(...changed.pairs.map((pair) => coagulationMargin(pairRates({ solved: changed, pair, requirement })))),
+        Math.min(...changed.pairs.map((pair) => coagulationMarginOf({ solved: changed, pair, requirement }))),
       ),
     ),
   });
@@ -69,7 +83,7 @@ export function verdict(question: VerdictQuestion): Verdict {
   const flocculation = flocculationLine({
     pair: solved.pairs[clinging],
     depthDoubt_kT: doubts[clinging].outerMinimum_kT,
-    pairedShare: wellOccupation({ solved, pair: solved.pairs[clinging] }),
+    pairedShare: shareInPairs(solved.pairs[clinging]),
     limits: findLimits(
       FLOCCULATION_LEVERS,
       lever(kindsOf(solved.pairs[clinging])),

@@ -6,7 +6,9 @@ import { parseScenario } from '../../core/scenario/parse';
 import type { Formulation, Particle, Scenario } from '../../core/scenario/scenario';
 import { leversFor } from '../../core/verdict/limitInputs';
 
-const parsed = parseScenario(readFileSync(new URL('../../assets/demo/white-base.sunder.json', import.meta.url), 'utf8'));
+const parsed = parseScenario(
+  readFileSync(new URL('../../assets/demo/white-base.sunder.json', import.meta.url), 'utf8'),
+);
 if (!parsed.ok) throw new Error('the demo scenario is not valid');
 const demo: Scenario = parsed.value;
 const [base] = demo.formulations;

@@ -26,6 +26,9 @@ describe('barrierCaveats', () => {
     expect(codes({ separation_m: 0.8e-9 })).toEqual(['inside-slip-planes', 'double-layer-overlap']);
     expect(barrierCaveats({ ...barrier, separation_m: 0.8e-9 })[0].message).toMatch(/0\.80 nm.*1\.00 nm/);
     expect(codes({ separation_m: 0.8e-9, model: 'constant-potential' })).toEqual(['inside-slip-planes']);
+    // Held up to the closest approach of bare surfaces, 0.165 nm, outside the slip planes; no farther.
+    expect(codes({ separation_m: 1.16e-9, model: 'constant-potential' })).toEqual(['inside-slip-planes']);
+    expect(codes({ separation_m: 1.17e-9, model: 'constant-potential' })).toEqual([]);
   });
 
   it('do not speak of slip planes that lie on the bare surfaces', () => {

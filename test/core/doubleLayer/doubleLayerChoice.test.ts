@@ -40,6 +40,10 @@ describe('chooseDoubleLayerModel by validity', () => {
   });
 
   it('counts the ends of its ranges as inside, and moves kT/e with the temperature', () => {
+    const curved = (kappaRadiusSmaller: number) =>
+      codes(chooseDoubleLayerModel({ ...pair, kappaRadiusSmaller }).caveats);
+    expect(curved(4.99)).toEqual(['double-layer-curvature']);
+    expect(curved(5)).toEqual([]);
     expect(chooseDoubleLayerModel({ ...pair, kappaRadiusSmaller: 10 }).model).toBe('constant-potential');
     expect(chooseDoubleLayerModel({ ...pair, temperature_K: 273 }).model).toBe('superposition');
   });
