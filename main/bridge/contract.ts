@@ -55,6 +55,11 @@ export interface Requests {
   'window:close': () => Promise<Result<'closing'>>;
 }
 
+/** Asked by the preload script alone, for files dropped on the page; the loopback host has no such request. */
+export interface ElectronRequests {
+  'scenario:open-path': (path: string) => Promise<Result<OpenFile>>;
+}
+
 export type MenuCommand =
   | 'new'
   | 'open'
@@ -100,3 +105,6 @@ export interface Desk {
 
 /** The host answers every request; arguments arrive as unknown and are checked before use. */
 export type Handlers = { readonly [C in keyof Requests]: (...untrusted: unknown[]) => ReturnType<Requests[C]> };
+export type ElectronHandlers = Handlers & {
+  readonly [C in keyof ElectronRequests]: (...untrusted: unknown[]) => ReturnType<ElectronRequests[C]>;
+};

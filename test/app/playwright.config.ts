@@ -5,8 +5,8 @@ const root = fileURLToPath(new URL('../../', import.meta.url));
 
 /**
  * One set of errands, three hosts. `stand-in` runs the built main process with a stand-in for Electron, `loopback` the
- * host for machines without Electron, `electron` the real one where its binary is. Which errands belong to which host
- * is said by the specs; `fixture.ts` reads the name of the project.
+ * host for machines without Electron, `electron` the real one where its binary is. An errand without a tag is run
+ * on all three; `@main-process` needs Electron or its stand-in, `@stand-in` and `@loopback` are for that host alone.
  */
 export default defineConfig({
   testDir: '.',
@@ -18,5 +18,9 @@ export default defineConfig({
   timeout: 60_000,
   expect: { timeout: 10_000 },
   reporter: 'list',
-  projects: [{ name: 'stand-in' }, { name: 'loopback' }, { name: 'electron' }],
+  projects: [
+    { name: 'stand-in', grepInvert: /@loopback/ },
+    { name: 'loopback', grepInvert: /@main-process|@stand-in/ },
+    { name: 'electron', grepInvert: /@loopback|@stand-in/ },
+  ],
 });

@@ -1,0 +1,5 @@
+/** A file taken into the bundle as text. */
+declare module '*?raw' {
+  const text: string;
+  export default text;
+}
