@@ -26,8 +26,10 @@ function logTimeToLose(share: number, { collisionRate_m3_s, numberDensity_per_m3
 }
 
 /** ln of the stability ratio needed so that no more than `acceptedLoss` of the singles is lost within `time_s`. */
-export const lnRequiredStabilityRatio = (time_s: number, acceptedLoss: number, encounters: Encounters): number =>
-  Math.log(time_s) - logTimeToLose(acceptedLoss, encounters);
+export function lnRequiredStabilityRatio(time_s: number, acceptedLoss: number, encounters: Encounters): number {
+  mustBePositive('lnRequiredStabilityRatio', { time_s });
+  return Math.log(time_s) - logTimeToLose(acceptedLoss, encounters);
+}
 
 /**
  * ln of the half-life [s] at a given ln W: the total count halves, t = 2W/(K n₀); for unlike particles half of the rarer

@@ -63,13 +63,21 @@ function caveatsOf({ radius1_m, radius2_m, layer1, layer2 }: StericPair): Caveat
   return caveats;
 }
 
-const mean = (one: LayerInput, other: LayerInput): LayerInput => ({
-  thickness_m: (one.thickness_m + other.thickness_m) / 2,
-  adsorbedAmount_kg_m2: (one.adsorbedAmount_kg_m2 + other.adsorbedAmount_kg_m2) / 2,
-  chainMolarMass_kg_mol: (one.chainMolarMass_kg_mol + other.chainMolarMass_kg_mol) / 2,
-  polymerDensity_kg_m3: (one.polymerDensity_kg_m3 + other.polymerDensity_kg_m3) / 2,
-  floryChi: (one.floryChi + other.floryChi) / 2,
-});
+/**
+ * The layer of which two hold as much polymer as the unlike two: mass, dry volume and number of chains add up. (With the
+ * plain mean of two densities a pair of dense layers could come out denser than dry polymer.)
+ */
+function mean(one: LayerInput, other: LayerInput): LayerInput {
+  const sum = (of: (layer: LayerInput) => number): number => of(one) + of(other);
+  const amounts_kg_m2 = sum(({ adsorbedAmount_kg_m2 }) => adsorbedAmount_kg_m2);
+  return {
+    thickness_m: sum(({ thickness_m }) => thickness_m) / 2,
+    adsorbedAmount_kg_m2: amounts_kg_m2 / 2,
+    chainMolarMass_kg_mol: amounts_kg_m2 / sum((layer) => layer.adsorbedAmount_kg_m2 / layer.chainMolarMass_kg_mol),
+    polymerDensity_kg_m3: amounts_kg_m2 / sum((layer) => layer.adsorbedAmount_kg_m2 / layer.polymerDensity_kg_m3),
+    floryChi: sum(({ floryChi }) => floryChi) / 2,
+  };
+}
 
 /**
  * Energy of the polymer layers [J] of two particles against the gap between their bare surfaces; null without layers.

@@ -13,18 +13,22 @@ export function findLimits(
   margin: (formulation: Formulation) => number,
 ): readonly Limit[] {
   const holdsNow = margin(question.formulation) > 0;
-  return leversFor(inputs, question).map((lever) => {
+  return leversFor(inputs, question).flatMap((lever) => {
     const found = nearestLimit({
       current: lever.current,
       from: lever.from,
       to: lever.to,
       margin: (value) => margin(lever.set(value)),
     });
-    return {
-      input: lever.input,
-      value: found?.value ?? null,
-      unit: lever.unit,
-      statement: limitSentence(lever, found, holdsNow),
-    };
+    // Nothing in the whole range makes a sound formulation fail: that is no limit.
+    if (found === null && holdsNow) return [];
+    return [
+      {
+        input: lever.input,
+        value: found?.value ?? null,
+        unit: lever.unit,
+        statement: limitSentence(lever, found, holdsNow),
+      },
+    ];
   });
 }

@@ -1,4 +1,5 @@
 import type { LimitInput } from '../evaluation';
+import { withHeldCharge } from '../formulation/heldCharge';
 import type { Formulation, Particle } from '../scenario/scenario';
 import { number } from './words';
 
@@ -13,8 +14,8 @@ export interface LimitLever {
   readonly set: (value: number) => Formulation;
   /** The value now, in words: `12 mM`, or `none`. */
   readonly now: string;
-  /** Held fixed although it would move in reality; said beside the limit. */
-  readonly proviso: string;
+  /** What is held while this moves, where that is not everything else; said beside the limit. */
+  readonly proviso: string | null;
 }
 
 const withParticle = (formulation: Formulation, index: number, change: Partial<Particle>): Formulation => ({
@@ -26,7 +27,8 @@ const withParticle = (formulation: Formulation, index: number, change: Partial<P
 function saltLever(formulation: Formulation): LimitLever | null {
   const doses = formulation.salts.filter(({ concentration_mM }) => concentration_mM > 0);
   const total_mM = doses.reduce((sum, dose) => sum + dose.concentration_mM, 0);
-  const name = doses.length === 1 ? 'salt' : doses.length === 0 ? 'added sodium chloride' : 'all salts together';
+  const name =
+    doses.length === 1 ? 'of the salt' : doses.length === 0 ? 'of added sodium chloride' : 'of all salts together';
   return {
     input: 'salt',
     name,
@@ -35,17 +37,18 @@ function saltLever(formulation: Formulation): LimitLever | null {
     now: total_mM === 0 ? 'none' : `${number(total_mM)} mM`,
     from: total_mM > 0 ? total_mM / 1000 : 0,
     to: Math.max(1000, 2 * total_mM),
-    set: (value_mM) => ({
-      ...formulation,
-      salts:
-        total_mM > 0
-          ? formulation.salts.map((dose) => ({
-              ...dose,
-              concentration_mM: (dose.concentration_mM / total_mM) * value_mM,
-            }))
-          : [...formulation.salts, { salt: 'sodium-chloride', concentration_mM: value_mM }],
-    }),
-    proviso: 'zeta held',
+    set: (value_mM) =>
+      withHeldCharge(formulation, {
+        ...formulation,
+        salts:
+          total_mM > 0
+            ? formulation.salts.map((dose) => ({
+                ...dose,
+                concentration_mM: (dose.concentration_mM / total_mM) * value_mM,
+              }))
+            : [...formulation.salts, { salt: 'sodium-chloride', concentration_mM: value_mM }],
+      }),
+    proviso: 'at the same surface charge',
   };
 }
 
@@ -60,7 +63,7 @@ function zetaLever(formulation: Formulation, kinds: readonly number[]): LimitLev
   if (weakest === undefined || charge === null) return null;
   return {
     input: 'zeta',
-    name: '|ζ|',
+    name: 'of |ζ|',
     unit: 'mV',
     current: Math.abs(charge.zeta_mV),
     now: `${number(Math.abs(charge.zeta_mV))} mV`,
@@ -70,7 +73,7 @@ function zetaLever(formulation: Formulation, kinds: readonly number[]): LimitLev
       withParticle(formulation, weakest, {
         charge: { ...charge, zeta_mV: (charge.zeta_mV > 0 ? 1 : -1) * value_mV },
       }),
-    proviso: 'salt held',
+    proviso: null,
   };
 }
 
@@ -91,7 +94,7 @@ function layerLever(formulation: Formulation, kinds: readonly number[]): LimitLe
   const current_nm = layers.length === kinds.length ? (thinnest?.thickness_nm ?? 0) : 0;
   return {
     input: 'layerThickness',
-    name: thinnest === undefined ? 'polymer layer (χ 0.4, a fifth polymer)' : 'polymer layer',
+    name: thinnest === undefined ? 'of a swollen polymer layer (χ 0.4)' : 'of polymer layer',
     unit: 'nm',
     current: current_nm === 0 ? TYPICAL_LAYER.thickness_nm : current_nm,
     now: current_nm === 0 ? 'none' : `${number(current_nm)} nm`,
@@ -112,7 +115,7 @@ function layerLever(formulation: Formulation, kinds: readonly number[]): LimitLe
         };
       }),
     }),
-    proviso: 'same share of polymer in the layer',
+    proviso: null,
   };
 }
 
@@ -121,21 +124,21 @@ function diameterLever(formulation: Formulation, kinds: readonly number[]): Limi
   const { diameter_nm } = formulation.particles[index];
   return {
     input: 'diameter',
-    name: 'diameter',
+    name: 'in diameter',
     unit: 'nm',
     current: diameter_nm,
     now: `${number(diameter_nm)} nm`,
     from: Math.max(2, diameter_nm / 20),
     to: diameter_nm * 20,
     set: (value_nm) => withParticle(formulation, index, { diameter_nm: value_nm }),
-    proviso: 'same loading',
+    proviso: null,
   };
 }
 
 function viscosityLever(formulation: Formulation, viscosity_mPa_s: number): LimitLever {
   return {
     input: 'viscosity',
-    name: 'viscosity at rest',
+    name: 'of viscosity at rest',
     unit: 'mPa·s',
     current: viscosity_mPa_s,
     now: `${number(viscosity_mPa_s)} mPa·s`,
@@ -145,7 +148,7 @@ function viscosityLever(formulation: Formulation, viscosity_mPa_s: number): Limi
       ...formulation,
       medium: { ...formulation.medium, measuredViscosity_mPa_s: value_mPa_s },
     }),
-    proviso: 'no yield stress counted',
+    proviso: null,
   };
 }
 
@@ -181,21 +184,17 @@ export function leversFor(inputs: readonly LimitInput[], question: LeverQuestion
     .filter((lever) => lever !== null);
 }
 
-/** `Holds below 35 mM salt (now 12 mM; zeta held)`, or that no value turns the answer. */
+/** `Holds up to 35 mM salt (now 12 mM)`, `Needs at least 38 mV of |ζ| (now 20 mV)`, or that no value turns the answer. */
 export function limitSentence(
-  lever: LimitLever,
-  found: { value: number; holds: 'above' | 'below' } | null,
+  { name, unit, now, from, to, proviso }: LimitLever,
+  found: { readonly value: number; readonly holds: 'above' | 'below' } | null,
   holdsNow: boolean,
 ): string {
-  const { name, unit, now, from, to, proviso } = lever;
-  const range = `${number(from)} to ${number(to)} ${unit}`;
-  if (found === null) {
-    return holdsNow
-      ? `Holds for ${name} anywhere from ${range} (${proviso}).`
-      : `No ${name} from ${range} makes this hold (${proviso}).`;
-  }
+  if (found === null) return `No ${name} from ${number(from)} to ${number(to)} ${unit} makes this hold.`;
   const bound = `${number(found.value)} ${unit}`;
-  const side = found.holds === 'above' ? 'of at least' : 'of at most';
-  const verb = holdsNow ? 'Holds with' : 'Would hold with';
-  return `${verb} ${name} ${side} ${bound} (now ${now}; ${proviso}).`;
+  const aside = proviso === null ? `(now ${now})` : `(now ${now}; ${proviso})`;
+  const words = holdsNow
+    ? { above: 'Holds down to', below: 'Holds up to' }[found.holds]
+    : { above: 'Needs at least', below: 'Needs at most' }[found.holds];
+  return `${words} ${bound} ${name} ${aside}.`;
 }

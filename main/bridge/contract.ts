@@ -68,9 +68,6 @@ export type MenuCommand =
   | 'undo'
   | 'redo'
   | 'duplicate-formulation'
-  | 'zoom-in'
-  | 'zoom-out'
-  | 'zoom-reset'
   | 'about'
   | 'shortcuts';
 

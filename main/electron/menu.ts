@@ -54,13 +54,7 @@ export function menuTemplate(platform: NodeJS.Platform, send: (command: MenuComm
   };
   const view: Item = {
     label: '&View',
-    submenu: [
-      item('Zoom &In', 'zoom-in', 'CmdOrCtrl+Plus'),
-      item('Zoom &Out', 'zoom-out', 'CmdOrCtrl+-'),
-      item('&Actual Size', 'zoom-reset', 'CmdOrCtrl+0'),
-      SEPARATOR,
-      { role: 'togglefullscreen' },
-    ],
+    submenu: [{ role: 'zoomIn' }, { role: 'zoomOut' }, { role: 'resetZoom' }, SEPARATOR, { role: 'togglefullscreen' }],
   };
   const help: Item = {
     role: 'help',

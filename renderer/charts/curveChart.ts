@@ -46,6 +46,17 @@ export interface CurveChart {
   close(): void;
 }
 
+/** Multiples of 1, 2 or 5 times a power of ten, about six of them over the height. */
+function niceTicks(min: number, max: number): readonly number[] {
+  const rough = (max - min) / 6;
+  const decade = 10 ** Math.floor(Math.log10(rough));
+  const step = decade * ([1, 2, 5].find((nice) => nice * decade >= rough) ?? 10);
+  const first = Math.ceil(min / step);
+  return Array.from({ length: Math.floor(max / step) - first + 1 }, (_, index) => (first + index) * step);
+}
+
+const plainNumber = (value: number | string): string => String(Number(Number(value).toPrecision(6))).replace('-', '−');
+
 const decadeLabels = (value: number | string): string => {
   const number = Number(value);
   const leading = number / 10 ** Math.floor(Math.log10(number) + 1e-9);
@@ -134,6 +145,16 @@ export function createCurveChart(canvas: HTMLCanvasElement): CurveChart {
       const { x, y, secondY, colours } = next;
       const grid = { color: colours.grid, drawTicks: false };
       const ticks = { color: colours.text, padding: 6, maxRotation: 0 };
+      const upright = (min: number, max: number) => ({
+        type: 'linear' as const,
+        min,
+        max,
+        border: { color: colours.strong },
+        ticks: { ...ticks, callback: plainNumber },
+        afterBuildTicks: (axis: { ticks: { value: number }[] }) => {
+          axis.ticks = niceTicks(min, max).map((value) => ({ value }));
+        },
+      });
       const title = (text: string) => ({ display: true, text, color: colours.text });
       chart.data.datasets = next.series.map(
         (series): ChartDataset<'line'> => ({
@@ -154,24 +175,12 @@ export function createCurveChart(canvas: HTMLCanvasElement): CurveChart {
           title: title(x.title),
           ticks: x.logarithmic ? { ...ticks, autoSkip: false, callback: decadeLabels } : ticks,
         },
-        y: {
-          type: 'linear',
-          min: y.min,
-          max: y.max,
-          grid,
-          border: { color: colours.strong },
-          title: title(y.title),
-          ticks,
-        },
+        y: { ...upright(y.min, y.max), grid, title: title(y.title) },
         second: {
-          type: 'linear',
+          ...upright(y.min * secondY.factor, y.max * secondY.factor),
           position: 'right',
-          min: y.min * secondY.factor,
-          max: y.max * secondY.factor,
           grid: { display: false },
-          border: { color: colours.strong },
           title: title(secondY.title),
-          ticks,
         },
       };
       chart.update('none');

@@ -49,7 +49,10 @@ export function Picker({ label, options, value, onPick, was, hiddenLabel = false
   const onKey = (event: KeyboardEvent): void => {
     if (event.key === 'ArrowDown' || event.key === 'ArrowUp') {
       event.preventDefault();
-      if (!open) return show();
+      if (!open) {
+        show();
+        return;
+      }
       const step = event.key === 'ArrowDown' ? 1 : -1;
       setMarked((marked + step + shown.length) % Math.max(1, shown.length));
     } else if (event.key === 'Enter' && open) {
@@ -90,11 +93,14 @@ export function Picker({ label, options, value, onPick, was, hiddenLabel = false
         onKeyDown={onKey}
         onBlur={leave}
       />
+      {/* biome-ignore lint/a11y/noNoninteractiveElementToInteractiveRole: the list of the ARIA combobox pattern */}
       <ul class="picker-list" id={`${id}-list`} role="listbox" aria-label={label} hidden={!open}>
         {shown.map((option, index) => (
+          // biome-ignore lint/a11y/useFocusableInteractive: focus stays in the text field, which points at the marked option
           <li
             key={option.id}
             id={`${id}-${option.id}`}
+            // biome-ignore lint/a11y/noNoninteractiveElementToInteractiveRole: an option of the ARIA combobox pattern
             role="option"
             aria-selected={index === marked}
             // Before blur, or the list would be gone when the click arrives.

@@ -9,7 +9,7 @@ import {
 } from '../../core/scenario/scenario';
 
 /** Sensible starting entries, to be replaced by the user's own: a white pigment in water. */
-export const newCharge: ParticleCharge = { zeta_mV: -40, zetaUncertainty_mV: 5, slipPlane_nm: 0.5 };
+export const newCharge: ParticleCharge = { zeta_mV: -40, zetaUncertainty_mV: 5, slipPlane_nm: 0.3 };
 
 export const newLayer: AdsorbedLayer = {
   thickness_nm: 8,

@@ -34,6 +34,7 @@ export function App() {
   const [dropping, setDropping] = useState(false);
   useKeys();
   return (
+    // biome-ignore lint/a11y/noStaticElementInteractions: dropping a file is a second way to open one
     <div
       class="window"
       onDragOver={(event) => {
@@ -55,8 +56,8 @@ export function App() {
       <TroublePanel />
       <main class="panes">
         <div class="column column-candidates">
-          <CandidateList />
           <RequirementPane />
+          <CandidateList />
         </div>
         <div class="column column-recipe">
           <RecipePane />

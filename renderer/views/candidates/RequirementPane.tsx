@@ -4,9 +4,9 @@ import { useDeskTop } from '../deskTop';
 
 const labels: Readonly<Record<keyof Requirement, string>> = {
   shelfLife_days: 'Shelf life',
-  acceptedLoss_percent: 'Singles that may be lost',
+  acceptedLoss_percent: 'Accepted loss of singles',
   fillHeight_mm: 'Fill height',
-  acceptedClearLayer_percent: 'Clear layer accepted',
+  acceptedClearLayer_percent: 'Accepted clear layer',
 };
 
 /** What every candidate must survive. */

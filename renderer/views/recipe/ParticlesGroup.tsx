@@ -48,28 +48,26 @@ function Kind({ particle, index }: { particle: Particle; index: number }) {
           if (value !== null) set('Change diameter', 'diameter_nm', { diameter_nm: value });
         }}
       />
-      <div class="row">
-        <QuantityField
-          label="Loading"
-          kind={particle.loadingBasis === 'mass' ? 'massLoading_percent' : 'volumeLoading_percent'}
-          value={particle.loading_percent}
-          was={recipe.wasAt(`${path}/loading_percent`)}
-          problem={recipe.problemAt(`${path}/loading_percent`)}
-          onCommit={(value) => {
-            if (value !== null) set('Change loading', 'loading_percent', { loading_percent: value });
-          }}
-        />
-        <ChoiceField
-          label="per"
-          value={particle.loadingBasis}
-          choices={[
-            ['volume', 'volume'],
-            ['mass', 'mass'],
-          ]}
-          was={recipe.wasAt(`${path}/loadingBasis`)}
-          onPick={(loadingBasis) => set('Change loading basis', 'loadingBasis', { loadingBasis })}
-        />
-      </div>
+      <QuantityField
+        label="Loading"
+        kind={particle.loadingBasis === 'mass' ? 'massLoading_percent' : 'volumeLoading_percent'}
+        value={particle.loading_percent}
+        was={recipe.wasAt(`${path}/loading_percent`)}
+        problem={recipe.problemAt(`${path}/loading_percent`)}
+        onCommit={(value) => {
+          if (value !== null) set('Change loading', 'loading_percent', { loading_percent: value });
+        }}
+      />
+      <ChoiceField
+        label="Loading is a share of the"
+        value={particle.loadingBasis}
+        choices={[
+          ['volume', 'volume'],
+          ['mass', 'mass'],
+        ]}
+        was={recipe.wasAt(`${path}/loadingBasis`)}
+        onPick={(loadingBasis) => set('Change loading basis', 'loadingBasis', { loadingBasis })}
+      />
       <QuantityField
         label="Density, if measured"
         kind="density_kg_m3"

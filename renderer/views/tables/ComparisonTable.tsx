@@ -17,7 +17,7 @@ interface Sorting {
 const order: readonly VerdictLevel[] = ['fails', 'borderline', 'holds'];
 const rank = (value: number | string | null): number => {
   if (value === null) return Number.NEGATIVE_INFINITY;
-  return typeof value === 'number' ? value : order.findIndex((level) => level === value);
+  return typeof value === 'number' ? value : (order as readonly string[]).indexOf(value);
 };
 
 interface IdentifiedRow extends ComparisonRow {

@@ -43,6 +43,7 @@ export function Tables() {
           </button>
         ))}
       </div>
+      {/* biome-ignore lint/a11y/noNoninteractiveTabindex: a panel without controls must be reachable to be scrolled by keys */}
       <div class="tab-panel" id={`${id}-panel`} role="tabpanel" aria-labelledby={`${id}-${shown}`} tabIndex={0}>
         <Shown />
       </div>

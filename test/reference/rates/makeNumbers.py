@@ -89,8 +89,14 @@ def places(top, width, far):
     return sorted(p for p in near + grid if p < far)
 
 
+def extremum(v, guess):
+    """Where the slope against ln h vanishes, by the secant method from a guess good to a fifth."""
+    x = mp.log(mp.mpf(guess))
+    return mp.exp(mp.findroot(lambda y: mp.diff(lambda t: v(mp.exp(t)), y), (x, x + mp.mpf('0.02'))))
+
+
 def barrier(v, guess):
-    top = mp.findroot(lambda h: mp.diff(v, h), mp.mpf(guess))
+    top = extremum(v, guess)
     return top, v(top), 1 / mp.sqrt(-mp.diff(v, top, 2))
 
 
@@ -122,14 +128,17 @@ for name, a1, a2, A, psi, salt, guess in CURVES:
         'lnStabilityRatioFromNothing': float(ln_w(v, mp.mpf('1e-12'), sorted(grid + [mp.mpf('2e-12'), mp.mpf('5e-12')]))),
     })
 
-# Attraction alone: from contact against from (almost) nothing.
-v = Curve('1e-7', '1e-7', '1e-20', '0', '1')
-grid = [mp.mpf(10) ** (-11 + mp.mpf(i) / 8) for i in range(0, 49)]
-out['attractionAlone'] = {
-    'radius_m': 1e-7, 'hamakerConstant_J': 1e-20, 'temperature_K': 298.15,
-    'lnStabilityRatioFromContact': float(ln_w(v, CONTACT, grid)),
-    'lnStabilityRatioFromNothing': float(ln_w(v, mp.mpf('1e-14'), [mp.mpf('1e-13'), mp.mpf('1e-12')] + grid)),
-}
+# Attraction alone: from contact against from (almost) nothing. Matters only where contact is but a few kT deep.
+out['attractionAlone'] = []
+for a, A in [('1e-7', '1e-20'), ('2.5e-8', '5e-21'), ('2.5e-8', '1e-21')]:
+    v = Curve(a, a, A, '0', '1')
+    grid = [mp.mpf(10) ** (-11 + mp.mpf(i) / 8) for i in range(0, 49)]
+    below = [mp.mpf(10) ** -k for k in (16, 15, 14, 13, 12)]
+    out['attractionAlone'].append({
+        'radius_m': float(a), 'hamakerConstant_J': float(A), 'temperature_K': 298.15,
+        'lnStabilityRatioFromContact': float(ln_w(v, CONTACT, grid)),
+        'lnStabilityRatioFromNothing': float(ln_w(v, mp.mpf('1e-17'), below + grid)),
+    })
 
 # A well outside a barrier: ordinary paint, large particles.
 out['wells'] = []
@@ -140,7 +149,7 @@ for a, A, psi, salt, guess_top, guess_well in [
 ]:
     v = Curve(a, a, A, psi, salt)
     top, height, width = barrier(v, guess_top)
-    well = mp.findroot(lambda h: mp.diff(v, h), mp.mpf(guess_well))
+    well = extremum(v, guess_well)
     far = mp.mpf('5e-7')
     s = v.a1 + v.a2
     # Where the curve passes through zero on the way in, and the panels of the well.
