@@ -4,6 +4,7 @@ export default defineConfig({
   test: {
     include: ['test/{core,main,renderer,house,published}/**/*.test.{ts,tsx}'],
     environment: 'node',
-    testTimeout: 20_000,
+    setupFiles: ['test/setup.ts'],
+    testTimeout: 60_000,
   },
 });

@@ -27,8 +27,8 @@ const PANELS = 200;
  *
  *     t = ∫_well^parted B(h) e^V/(D r²) ∫_barrier^h r'² e^(−V) dh' dh,   r = a₁ + a₂ + h,   D = (kT/6πη)(1/a₁ + 1/a₂)
  *
- * Mean first passage with the barrier as a reflecting wall, in the log domain. The inner integral is
- * inner one is advanced from panel to panel.
+ * Mean first passage with the barrier as a reflecting wall, in the log domain. The inner
+ * integral is carried along from panel to panel.
  *
  * Source  Kramers, Physica 7 (1940) 284, in the exact one-dimensional form (from memory); B: {@link hydrodynamicFactor}.
  * Valid   dilute pairs at rest. For shallow wells the time is that of diffusing to `parted_m`, and so depends on it.

@@ -6,7 +6,8 @@ const STEPS = 200;
  * bisections.
  *
  * Source  Brent, Algorithms for Minimization without Derivatives, 1973, chapter 4 (from memory).
- * Throws  RangeError when the signs at the ends do not differ, or the function is not a number.
+ * Valid   a root at or within rounding of zero has no relative width: give a tolerance.
+ * Throws  RangeError when the signs at the ends do not differ, the function is not a number, or 200 steps do not do.
  */
 export function brentRoot(f: (x: number) => number, from: number, to: number, tolerance = 0): number {
   let previous = from;
@@ -36,7 +37,7 @@ export function brentRoot(f: (x: number) => number, from: number, to: number, to
     const half = (counter - best) / 2;
     if (atBest === 0 || Math.abs(half) <= width) return best;
     const guessed = interpolatedStep(previous, best, counter, atPrevious, atBest, atCounter);
-    const gains = Math.abs(guessed) < 0.75 * Math.abs(half) * 2 && Math.abs(guessed) < Math.abs(stepBefore) / 2;
+    const gains = Math.abs(guessed) < 1.5 * Math.abs(half) && Math.abs(guessed) < Math.abs(stepBefore) / 2;
     if (gains && guessed * half > 0 && Math.abs(atPrevious) > Math.abs(atBest)) {
       stepBefore = step;
       step = guessed;
@@ -50,7 +51,7 @@ export function brentRoot(f: (x: number) => number, from: number, to: number, to
     atBest = f(best);
     if (Number.isNaN(atBest)) throw new RangeError(`brentRoot: the function is not a number at ${best}`);
   }
-  return best;
+  throw new RangeError(`brentRoot: no root to the width asked for after ${STEPS} steps, near ${best}`);
 }
 
 /** Secant through two points, inverse parabola through three. */

@@ -4,6 +4,9 @@ import { placeOfMaximum } from '../numerics/peak';
 /** Wells and barriers smaller than this are noise to a particle that kT shakes. */
 const SMALLEST_kT = 1e-3;
 
+/** In ln h: a place is found to this share of itself. */
+const PLACE_TOLERANCE = 1e-7;
+
 type Energy = (separation_m: number) => number;
 
 interface Scan {
@@ -23,6 +26,7 @@ function refined({ energy_kT, separation_m, values_kT }: Scan, index: number, si
     (logSeparation) => sign * energy_kT(Math.exp(logSeparation)),
     Math.log(separation_m[index - 1]),
     Math.log(separation_m[index + 1]),
+    PLACE_TOLERANCE,
   );
   const place_m = Math.exp(at);
   const value_kT = energy_kT(place_m);
@@ -58,7 +62,8 @@ const deepest = (points: readonly CurvePoint[]): CurvePoint | null =>
  * Barrier and minima of an energy curve, refined on the function to 1e-7 of their place.
  *
  * The barrier is the highest maximum above zero; a curve that climbs all the way to contact (a polymer wall) has its
- * barrier there. With no barrier, a maximum below zero still parts the contact side from the outer side. The primary
+ * barrier there. With no barrier, a maximum below zero, or such a climb to contact that ends below zero, still parts the
+ * contact side from the outer side: the well before a polymer wall is an outer one, however weak the wall. The primary
  * minimum is the deepest point on the contact side, the outer minimum the deepest local minimum beyond.
  */
 export function findFeatures(energy_kT: Energy, separation_m: Float64Array): CurveFeatures {
@@ -68,7 +73,7 @@ export function findFeatures(energy_kT: Energy, separation_m: Float64Array): Cur
   const maxima = extrema(values_kT, 1).map((index) => refined(scan, index, 1));
   const wall = values_kT[0] > values_kT[1] ? [contact] : [];
   const barrier = highest([...maxima, ...wall].filter((point) => point.energy_kT > SMALLEST_kT));
-  const divide = barrier ?? highest(maxima);
+  const divide = barrier ?? highest([...maxima, ...wall]);
   const minima = extrema(values_kT, -1).map((index) => refined(scan, index, -1));
   const wells = minima.filter((point) => point.energy_kT < -SMALLEST_kT);
   const isInside = (point: CurvePoint): boolean => divide === null || point.separation_m < divide.separation_m;

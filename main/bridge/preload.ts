@@ -1,5 +1,6 @@
 import { contextBridge, ipcRenderer, webUtils } from 'electron';
 import type { Desk, ElectronRequests, Notices, Requests } from './contract';
+import { createWaitingNotices } from './waitingNotices';
 
 type AllRequests = Requests & ElectronRequests;
 
@@ -9,16 +10,17 @@ const ask =
   (...given: Parameters<AllRequests[C]>): ReturnType<AllRequests[C]> =>
     ipcRenderer.invoke(channel, ...given) as ReturnType<AllRequests[C]>;
 
-/** The listener gets the payload only, never Electron's event. */
-const hear =
-  <N extends keyof Notices>(channel: N) =>
-  (listener: (...payload: Parameters<Notices[N]>) => void): (() => void) => {
-    const forward = (_event: unknown, ...payload: unknown[]) => listener(...(payload as Parameters<Notices[N]>));
-    ipcRenderer.on(channel, forward);
-    return () => {
-      ipcRenderer.removeListener(channel, forward);
-    };
-  };
+/**
+ * The listener gets the payload only, never Electron's event. The page listens only once it has drawn itself: what
+ * comes before, a file named at the start, waits for the first listener.
+ */
+function hear<N extends keyof Notices>(
+  channel: N,
+): (listener: (...payload: Parameters<Notices[N]>) => void) => () => void {
+  const waiting = createWaitingNotices<Parameters<Notices[N]>>();
+  ipcRenderer.on(channel, (_event, ...payload) => waiting.tell(payload as Parameters<Notices[N]>));
+  return waiting.listen;
+}
 
 const openPath = ask('scenario:open-path');
 

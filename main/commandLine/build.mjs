@@ -110,9 +110,10 @@ const isCurrent = (name) => {
 };
 
 /** Builds what is missing or older than its sources; returns the names of the parts that were built. */
-export async function ensureBuilt(names = Object.keys(parts), { force = false } = {}) {
+export async function ensureBuilt(names = Object.keys(parts), { force = false, onBuild = () => undefined } = {}) {
   const wanted = names.filter((name) => force || !isCurrent(name));
   if (wanted.length === 0) return [];
+  onBuild(wanted);
   const { build } = await import('vite');
   for (const name of wanted) {
     const start = new Date();

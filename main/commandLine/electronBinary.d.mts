@@ -10,4 +10,5 @@ export function installElectron(options?: {
   readonly stall_ms?: number;
   readonly limit_ms?: number;
   readonly progress?: () => number;
+  readonly onProgress?: (received_bytes: number) => void;
 }): Promise<string | null>;

@@ -43,6 +43,9 @@ const received_bytes = () =>
       .map((name) => join(tmpdir(), name)),
   ].reduce((sum, folder) => sum + sizeOfFilesIn_bytes(folder), 0);
 
+const PROGRESS_EVERY_ms = 10_000;
+const SIGNALS = ['SIGINT', 'SIGTERM', 'SIGHUP'];
+
 function stop(child) {
   try {
     if (process.platform === 'win32') child.kill('SIGKILL');
@@ -56,8 +59,9 @@ function stop(child) {
 export function installElectron({
   script = join(packageFolder, 'install.js'),
   stall_ms = 8_000,
-  limit_ms = 180_000,
+  limit_ms = 300_000,
   progress = received_bytes,
+  onProgress = () => undefined,
 } = {}) {
   if (!existsSync(script)) return Promise.resolve('its package is not installed');
   return new Promise((resolve) => {
@@ -73,16 +77,29 @@ export function installElectron({
     child.stderr.on('data', listen);
     const start_ms = Date.now();
     let moved_ms = start_ms;
+    let told_ms = start_ms;
     let before = '';
+    // The installer has a process group of its own: Ctrl-C here has to be passed on.
+    const interrupted = () => {
+      stop(child);
+      process.exit(130);
+    };
+    for (const signal of SIGNALS) process.once(signal, interrupted);
     const watch = setInterval(() => {
-      const now = `${heard} ${progress()}`;
+      const received = progress();
+      const now = `${heard} ${received}`;
       if (now !== before) moved_ms = Date.now();
       before = now;
       if (Date.now() - moved_ms > stall_ms) end('its download does not move');
       else if (Date.now() - start_ms > limit_ms) end('its download takes too long');
+      else if (Date.now() - told_ms > PROGRESS_EVERY_ms) {
+        told_ms = Date.now();
+        onProgress(received);
+      }
     }, 250);
     const end = (reason) => {
       clearInterval(watch);
+      for (const signal of SIGNALS) process.off(signal, interrupted);
       stop(child);
       resolve(reason);
     };

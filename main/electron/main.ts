@@ -19,6 +19,9 @@ function fileArgument(commandLine: readonly string[], folder: string): string | 
   return named === undefined ? null : resolve(folder, named);
 }
 
+/** Awaited by `npm start`, which has another way to show the page when this does not come. */
+const WINDOW_IS_OPEN = 'Sunder: the window is open.';
+
 let desk: DeskWindow | null = null;
 let files: ScenarioFiles | null = null;
 /** A file the system asked us to open before the window was there. */
@@ -50,8 +53,16 @@ function start(): void {
   const folders = userFolders();
   const own = process.env.SUNDER_DOCUMENTS_DIR;
   const startFolder = own === undefined || own === '' ? app.getPath('documents') : own;
-  files = createScenarioFiles(createTickets(), createRecentFiles(folders.data));
-  const opened = openDeskWindow(join(built, 'preload.cjs'));
+  const recent = createRecentFiles(folders.data);
+  const noteRecent = (path: string): Promise<void> => {
+    // The system's own list, where it has one.
+    app.addRecentDocument(path);
+    return recent.note(path);
+  };
+  files = createScenarioFiles(createTickets(), { ...recent, note: noteRecent });
+  const opened = openDeskWindow(join(built, 'preload.cjs'), () => {
+    if (process.env.SUNDER_SAY_WHEN_OPEN === '1') process.stdout.write(`${WINDOW_IS_OPEN}\n`);
+  });
   desk = opened;
   opened.window.on('closed', () => {
     desk = null;

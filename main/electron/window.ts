@@ -1,8 +1,9 @@
-import { BrowserWindow } from 'electron';
+import { BrowserWindow, dialog, nativeTheme } from 'electron';
 import type { Notices } from '../bridge/contract';
 import type { HostWindow } from '../bridge/handlers';
 import { isOurPage } from '../bridge/listen';
 import { PAGE_ADDRESS } from './page';
+import { GROUND, titleOf } from './windowLook';
 
 export interface DeskWindow extends HostWindow {
   readonly window: BrowserWindow;
@@ -22,14 +23,18 @@ function keepInPlace({ webContents }: BrowserWindow): void {
 }
 
 /** Opens the one window of the program and loads the page in it. */
-export function openDeskWindow(preloadPath: string): DeskWindow {
+export function openDeskWindow(preloadPath: string, onOpen: () => void = () => undefined): DeskWindow {
   const window = new BrowserWindow({
+    // Place and size come back at the next start, on a screen that is still there: Electron sees to both.
+    name: 'desk',
+    windowStatePersistence: true,
     width: 1360,
     height: 860,
-    minWidth: 800,
-    minHeight: 560,
+    minWidth: 900,
+    minHeight: 600,
     show: false,
     title: 'Sunder',
+    backgroundColor: nativeTheme.shouldUseDarkColors ? GROUND.dark : GROUND.light,
     webPreferences: {
       preload: preloadPath,
       contextIsolation: true,
@@ -52,7 +57,10 @@ export function openDeskWindow(preloadPath: string): DeskWindow {
   };
 
   keepInPlace(window);
-  window.once('ready-to-show', () => window.show());
+  window.once('ready-to-show', () => {
+    window.show();
+    onOpen();
+  });
   // Our own title stands; the page has none to add.
   window.on('page-title-updated', (event) => event.preventDefault());
   window.on('unresponsive', () => {
@@ -64,8 +72,10 @@ export function openDeskWindow(preloadPath: string): DeskWindow {
   window.webContents.on('render-process-gone', (_event, { reason }) => {
     pageAnswers = false;
     process.stderr.write(`The page ended (${reason}).\n`);
+    if (reason !== 'clean-exit') void offerNewPage(window);
   });
   window.webContents.on('did-finish-load', () => {
+    pageAnswers = true;
     if (!isOurPage(window.webContents.getURL())) return;
     pageListens = true;
     for (const send of waiting.splice(0)) send();
@@ -83,7 +93,8 @@ export function openDeskWindow(preloadPath: string): DeskWindow {
     notify,
     noteUnsaved: (isUnsaved, displayName) => {
       unsaved = isUnsaved;
-      window.setTitle(`${isUnsaved ? '• ' : ''}${displayName === '' ? '' : `${displayName} – `}Sunder`);
+      window.setTitle(titleOf(displayName, isUnsaved));
+      window.setDocumentEdited(isUnsaved);
     },
     close: () => {
       leaving = true;
@@ -95,4 +106,19 @@ export function openDeskWindow(preloadPath: string): DeskWindow {
       window.focus();
     },
   };
+}
+
+/** A page that has ended leaves an empty window; the user says whether to go on. */
+async function offerNewPage(window: BrowserWindow): Promise<void> {
+  const { response } = await dialog.showMessageBox({
+    type: 'error',
+    message: 'The window stopped unexpectedly.',
+    detail: 'What was not saved is lost. Files are as they were saved last.',
+    buttons: ['Open it again', 'Quit'],
+    defaultId: 0,
+    cancelId: 0,
+  });
+  if (window.isDestroyed()) return;
+  if (response === 0) window.webContents.reload();
+  else window.destroy();
 }

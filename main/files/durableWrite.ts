@@ -1,7 +1,7 @@
 import { randomBytes } from 'node:crypto';
 import { constants } from 'node:fs';
 import * as nodeFiles from 'node:fs/promises';
-import { basename, dirname, join } from 'node:path';
+import { basename, dirname, join, resolve } from 'node:path';
 import { setTimeout as pause } from 'node:timers/promises';
 import { systemCodeOf } from './faultsInWords';
 
@@ -22,7 +22,10 @@ const HELD_ELSEWHERE = new Set(['EPERM', 'EACCES', 'EBUSY']);
 /** The file system or the folder's rights do not allow a folder to be synced: then the rename is all there is. */
 const NO_FOLDER_SYNC = new Set(['EINVAL', 'ENOTSUP', 'EACCES']);
 
-/** One writer per file: a second save of the same file waits for the first, so that the newest wins. */
+/**
+ * One writer per file: a second save of the same file waits for the first, so that the newest wins. The place in the
+ * queue is taken at once, before anything that waits; two saves would overtake each other otherwise.
+ */
 const queues = new Map<string, Promise<void>>();
 
 /**
@@ -31,15 +34,17 @@ const queues = new Map<string, Promise<void>>();
  */
 export async function durableWrite(path: string, text: string, options: Options = {}): Promise<void> {
   const { files = nodeFiles } = options;
-  const target = await realPath(path, files);
-  const before = queues.get(target) ?? Promise.resolve();
+  const place = resolve(path);
+  const before = queues.get(place) ?? Promise.resolve();
   // A save that failed was told to its own caller; the next one starts afresh.
-  const turn = before.catch(() => undefined).then(() => replace(target, text, files, options));
-  queues.set(target, turn);
+  const turn = before
+    .catch(() => undefined)
+    .then(async () => replace(await realPath(place, files), text, files, options));
+  queues.set(place, turn);
   try {
     await turn;
   } finally {
-    if (queues.get(target) === turn) queues.delete(target);
+    if (queues.get(place) === turn) queues.delete(place);
   }
 }
 

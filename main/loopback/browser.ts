@@ -77,6 +77,26 @@ export interface BrowserWindow {
 
 const LEAVE_ms = 3_000;
 
+/** A window of its own on one page: nothing kept, nothing fetched, and no name found but our own address. */
+export const windowArguments = (profile: string, startPage: string): readonly string[] => [
+  `--app=${pathToFileURL(startPage).href}`,
+  `--user-data-dir=${profile}`,
+  '--window-size=1360,860',
+  '--no-first-run',
+  '--no-default-browser-check',
+  '--disable-sync',
+  '--disable-extensions',
+  '--disable-default-apps',
+  '--disable-background-networking',
+  '--disable-component-update',
+  '--disable-domain-reliability',
+  '--disable-features=Translate,MediaRouter,OptimizationHints',
+  '--host-resolver-rules=MAP * ~NOTFOUND , EXCLUDE 127.0.0.1',
+  // The profile is thrown away, so no key ring of the desktop need be opened for it.
+  '--password-store=basic',
+  '--use-mock-keychain',
+];
+
 /** Opens the page as a window of its own, with a profile of its own that is gone afterwards. */
 export async function openWindow(browser: string, address: string): Promise<BrowserWindow> {
   const profile = await mkdtemp(join(profileParent(browser), 'sunder-'));
@@ -90,19 +110,7 @@ export async function openWindow(browser: string, address: string): Promise<Brow
   );
   const child = spawn(
     browser,
-    [
-      `--app=${pathToFileURL(startPage).href}`,
-      `--user-data-dir=${profile}`,
-      '--window-size=1360,860',
-      '--no-first-run',
-      '--no-default-browser-check',
-      '--disable-sync',
-      '--disable-extensions',
-      '--disable-background-networking',
-      '--disable-component-update',
-      ...(isRoot() ? ['--no-sandbox'] : []),
-      ...moreArguments(),
-    ],
+    [...windowArguments(profile, startPage), ...(isRoot() ? ['--no-sandbox'] : []), ...moreArguments()],
     // What a browser says about itself is no message of ours.
     { stdio: 'ignore' },
   );

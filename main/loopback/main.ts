@@ -7,11 +7,12 @@ import { createScenarioFiles } from '../files/scenarioFiles';
 import { createTickets } from '../files/tickets';
 import { userFolders } from '../files/userFolders';
 import { type BrowserWindow, findBrowser, hasDisplay, isRoot, openWindow } from './browser';
+import { createHeartbeat } from './heartbeat';
 import { type LoopbackServer, startServer } from './server';
 
 /** How long a window may take to show the page. */
 const START_ms = 30_000;
-/** How long the host stays when the window is gone but a page may come back, as on a reload. */
+/** How long the host stays when no page is there, since one may come back, as on a reload. */
 const LINGER_ms = 30_000;
 /** Connections of a window that ended are seen closed a moment later. */
 const SETTLE_ms = 1_000;
@@ -27,6 +28,7 @@ let ending = false;
 async function end(exitCode = 0): Promise<void> {
   if (ending) return;
   ending = true;
+  heartbeat.stop();
   await server?.close();
   await window?.close();
   process.exit(exitCode);
@@ -39,16 +41,14 @@ function offerAddress(reason: string, { startAddress }: LoopbackServer): void {
   say('Ctrl-C ends Sunder.');
 }
 
-let lingering: NodeJS.Timeout | null = null;
-let pageWasHere = false;
-
-/** Ends the program when the window and the last page of it are gone. */
-function onStreams(count: number): void {
-  if (lingering !== null) clearTimeout(lingering);
-  lingering = null;
-  if (count > 0) pageWasHere = true;
-  else if (pageWasHere && window !== null && !window.isOpen()) lingering = setTimeout(() => void end(), LINGER_ms);
-}
+/**
+ * Ends the program when the last page is gone, even if the browser stays, as browsers do on a Mac. Without a window of
+ * ours the page may be opened again: the browser has forgotten its pass once it was closed.
+ */
+const heartbeat = createHeartbeat(LINGER_ms, () => {
+  if (window !== null) void end();
+  else if (server !== null) say(`To open the page again: ${server.renewStartAddress()}`);
+});
 
 async function showWindow(browser: string, { startAddress, isStarted, streams }: LoopbackServer): Promise<void> {
   if (isRoot()) say('Started as root: the browser window runs without its sandbox (--no-sandbox).');
@@ -84,7 +84,11 @@ async function start(): Promise<void> {
       close: () => setTimeout(() => window !== null && void end(), 100),
     },
   });
-  const started = await startServer({ handlers, pageRoot: join(import.meta.dirname, '..', 'renderer'), onStreams });
+  const started = await startServer({
+    handlers,
+    pageRoot: join(import.meta.dirname, '..', 'renderer'),
+    onStreams: heartbeat.note,
+  });
   server = started;
   for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'] as const) process.on(signal, () => void end());
 

@@ -9,7 +9,9 @@ const isSame = (one: string, other: string): boolean =>
 /** Who may talk to the host: whoever came with the ticket, once, and has had the cookie since. */
 export interface Pass {
   /** Good for one visit. */
-  readonly ticket: string;
+  readonly ticket: () => string;
+  /** A new ticket in place of the old one; whoever has the cookie keeps it. */
+  readonly renew: () => void;
   readonly isUsed: () => boolean;
   /** The cookie in exchange for the ticket; null for a wrong or used one. */
   readonly exchange: (ticket: string) => string | null;
@@ -17,13 +19,17 @@ export interface Pass {
 }
 
 export function createPass(port: () => number): Pass {
-  const ticket = secret();
+  let ticket = secret();
   const key = secret();
   let used = false;
   // Cookies do not know ports, so the name has to.
   const name = () => `s_${port()}`;
   return {
-    ticket,
+    ticket: () => ticket,
+    renew: () => {
+      ticket = secret();
+      used = false;
+    },
     isUsed: () => used,
     exchange: (given) => {
       if (used || !isSame(given, ticket)) return null;

@@ -15,6 +15,8 @@ export interface LoopbackServer {
   readonly port: number;
   /** Carries the ticket: it opens the page once. */
   readonly startAddress: string;
+  /** Another such address, when the first was used and the page is gone. */
+  readonly renewStartAddress: () => string;
   readonly isStarted: () => boolean;
   readonly streams: NoticeStreams;
   readonly close: () => Promise<void>;
@@ -155,9 +157,14 @@ export async function startServer({
     server.listen({ host: ADDRESS, port: 0, exclusive: true }, listening);
   });
   port = (server.address() as AddressInfo).port;
+  const startAddress = () => `${origin()}${START_PATH}?ticket=${pass.ticket()}`;
   return {
     port,
-    startAddress: `${origin()}${START_PATH}?ticket=${pass.ticket}`,
+    startAddress: startAddress(),
+    renewStartAddress: () => {
+      pass.renew();
+      return startAddress();
+    },
     isStarted: pass.isUsed,
     streams,
     close: async () => {

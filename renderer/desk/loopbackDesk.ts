@@ -30,15 +30,30 @@ const ask =
     return answer as Awaited<ReturnType<Requests[C]>>;
   };
 
-/** One stream for all notices, opened with the page: it also tells the host that the page is there. */
-const hear =
-  (stream: EventSource) =>
-  <N extends keyof Notices>(notice: N) =>
-  (listener: (...payload: Parameters<Notices[N]>) => void): (() => void) => {
-    const forward = (event: MessageEvent<string>) => listener(...(JSON.parse(event.data) as Parameters<Notices[N]>));
-    stream.addEventListener(notice, forward);
-    return () => stream.removeEventListener(notice, forward);
+/**
+ * One stream for all notices, opened with the page: it also tells the host that the page is there. What comes before
+ * the page listens, a file named at the start, waits for the first listener.
+ */
+function hear(stream: EventSource) {
+  return <N extends keyof Notices>(notice: N) => {
+    type Payload = Parameters<Notices[N]>;
+    const listeners = new Set<(...payload: Payload) => void>();
+    const waiting: Payload[] = [];
+    stream.addEventListener(notice, (event: MessageEvent<string>) => {
+      const payload = JSON.parse(event.data) as Payload;
+      if (listeners.size === 0) waiting.push(payload);
+      for (const listener of [...listeners]) listener(...payload);
+    });
+    return (listener: (...payload: Payload) => void): (() => void) => {
+      const own = (...payload: Payload) => listener(...payload);
+      listeners.add(own);
+      for (const payload of waiting.splice(0)) queueMicrotask(() => own(...payload));
+      return () => {
+        listeners.delete(own);
+      };
+    };
   };
+}
 
 /** A file dropped on the page has no place here that the host knows: saving asks for a name. */
 async function openDropped(file: File): Promise<Result<OpenFile>> {
@@ -75,7 +90,6 @@ export function createLoopbackDesk(): Desk {
     documentNames: ask('documents:list'),
     noteUnsaved: (isUnsaved, displayName) => {
       unsaved = isUnsaved;
-      document.title = `${isUnsaved ? '• ' : ''}${displayName === '' ? '' : `${displayName} – `}Sunder`;
       return noteUnsaved(isUnsaved, displayName);
     },
     closeWindow: ask('window:close'),

@@ -79,9 +79,9 @@ const rows: readonly Row[] = [
   },
   {
     who: /^main\/(?!commandLine\/[^/]+\.mjs$)/,
-    values: /^(main\/|core\/|electron$|node:|package\.json$)/,
+    values: /^(main\/|core\/|electron$|node:|package\.json$|assets\/demo\/)/,
     types: anything,
-    rule: 'main imports main, core, electron and node',
+    rule: 'main imports main, core, electron, node and the demo scenario',
   },
   {
     who: /^main\//,
