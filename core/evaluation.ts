@@ -212,7 +212,7 @@ export interface Limit {
   /** Value at which the level turns, in the unit named; null when no value within the searched range does. */
   readonly value: number | null;
   readonly unit: string;
-  /** `Holds up to 35 mM of the salt (now 12 mM …)`, `Needs at least 38 mV of |ζ| (now 20 mV)`, or that none helps. */
+  /** `Holds up to a salt concentration of 35 mM (now 12 mM)`, `Needs a |ζ| of at least 38 mV (now 20 mV)`, or that none helps. */
   readonly statement: string;
 }
 

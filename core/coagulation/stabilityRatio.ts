@@ -14,7 +14,7 @@ export interface ApproachingPair {
 }
 
 /** Beyond this many radii the energy is taken as zero and the rest of the integral is closed. */
-const FAR_RADII = 1e4;
+const FAR_RADII = 1e3;
 
 /**
  * Natural logarithm of the stability ratio W: how many times slower particles stick than free encounters would let them.
@@ -54,6 +54,8 @@ export function lnStabilityRatio({
     );
   };
   const near = logIntegral(logIntegrand, Math.log(contact_m), Math.log(far_m));
-  const rest = Math.log(reach_m / (reach_m + far_m));
+  // Out there B − 1 falls as 1/h, so that on average half of it is left.
+  const slowing = (1 + hydrodynamics(far_m / meanRadius_m)) / 2;
+  const rest = Math.log((slowing * reach_m) / (reach_m + far_m));
   return logAdd(near, rest);
 }

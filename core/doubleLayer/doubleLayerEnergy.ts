@@ -6,7 +6,7 @@ import { constantPotentialEnergy } from './constantPotential';
 import { debyeLength } from './debyeLength';
 import { sphereEffectivePotential } from './effectivePotential';
 import { type Ion, screeningSum } from './reducedField';
-import { superposedEnergy } from './superposition';
+import { prepareSuperposition } from './superposition';
 
 export interface DoubleLayerInput {
   readonly model: DoubleLayerModel;
@@ -67,12 +67,11 @@ export function prepareDoubleLayer(input: DoubleLayerInput): (separation_m: numb
     case 'superposition': {
       const effective = (potential_V: number, radius_m: number): number =>
         sphereEffectivePotential({ ions, potential_V, temperature_K, kappaRadius: kappa * radius_m });
-      const far = {
-        ...spheres,
-        effectivePotential1_V: effective(zeta1_V, spheres.radius1_m),
-        effectivePotential2_V: effective(zeta2_V, spheres.radius2_m),
-      };
-      return (separation_m) => superposedEnergy({ gap_m: gapAt(separation_m), ...far });
+      const effectivePotential1_V = effective(zeta1_V, spheres.radius1_m);
+      const alike = zeta1_V === zeta2_V && spheres.radius1_m === spheres.radius2_m;
+      const effectivePotential2_V = alike ? effectivePotential1_V : effective(zeta2_V, spheres.radius2_m);
+      const energy = prepareSuperposition({ ...spheres, effectivePotential1_V, effectivePotential2_V });
+      return (separation_m) => energy(gapAt(separation_m));
     }
   }
 }

@@ -1,10 +1,10 @@
 import { VACUUM_PERMITTIVITY_F_m } from '../constants';
 import { mustBeFinite, mustBePositive } from '../validity';
-import { type ChargedSpheres, type ChargedSpheresInSalt, mustBePotentials, mustBeSpheres } from './chargedSpheres';
+import type { ChargedSpheres, ChargedSpheresInSalt } from './chargedSpheres';
 import { curvatureFactor } from './curvatureFactor';
 import { thermalVoltage } from './thermalVoltage';
 
-interface EffectiveSpheres extends Omit<ChargedSpheres, 'potential1_V' | 'potential2_V'> {
+export interface EffectiveSpheres extends Omit<ChargedSpheres, 'potential1_V' | 'potential2_V'> {
   /** Far-field potentials, defined by ψ(r) → ψ_eff (a/r) e^(−κ(r−a)). */
   readonly effectivePotential1_V: number;
   readonly effectivePotential2_V: number;
@@ -19,15 +19,23 @@ interface EffectiveSpheres extends Omit<ChargedSpheres, 'potential1_V' | 'potent
  * Valid   κh above 1, any κa, any potential that the effective potentials Ψ are right for.
  * Throws  RangeError for a gap, radius, κ or permittivity that is not positive, or a non-finite potential.
  */
-export function superposedEnergy(spheres: EffectiveSpheres): number {
-  const { gap_m, radius1_m, radius2_m, inverseDebyeLength_per_m, relativePermittivity } = spheres;
+export function superposedEnergy({ gap_m, ...spheres }: EffectiveSpheres): number {
+  mustBePositive('superposedEnergy', { gap_m });
+  return prepareSuperposition(spheres)(gap_m);
+}
+
+/** As {@link superposedEnergy}, checked once and then asked at many gaps above zero: a curve needs thousands. */
+export function prepareSuperposition(spheres: Omit<EffectiveSpheres, 'gap_m'>): (gap_m: number) => number {
+  const { radius1_m, radius2_m, inverseDebyeLength_per_m, relativePermittivity } = spheres;
   const { effectivePotential1_V, effectivePotential2_V } = spheres;
-  mustBeSpheres('superposedEnergy', spheres);
-  mustBePotentials('superposedEnergy', effectivePotential1_V, effectivePotential2_V);
+  mustBePositive('prepareSuperposition', { radius1_m, radius2_m, inverseDebyeLength_per_m, relativePermittivity });
+  mustBeFinite('prepareSuperposition', { effectivePotential1_V, effectivePotential2_V });
   const permittivity_F_m = relativePermittivity * VACUUM_PERMITTIVITY_F_m;
-  const size_m = radius1_m * (radius2_m / (radius1_m + radius2_m + gap_m));
-  const fall = Math.exp(-inverseDebyeLength_per_m * gap_m);
-  return 4 * Math.PI * permittivity_F_m * size_m * effectivePotential1_V * effectivePotential2_V * fall;
+  const strength = 4 * Math.PI * permittivity_F_m * effectivePotential1_V * effectivePotential2_V; // J/m
+  return (gap_m) => {
+    const size_m = radius1_m * (radius2_m / (radius1_m + radius2_m + gap_m));
+    return strength * size_m * Math.exp(-inverseDebyeLength_per_m * gap_m);
+  };
 }
 
 /**

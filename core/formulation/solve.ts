@@ -36,16 +36,19 @@ export function pairIndices(kinds: number): readonly (readonly [number, number])
 /** Features and rate are worked out when first asked for: a limit search needs only one of them. */
 function solvePair(model: PairModel, first: number, second: number): SolvedPair {
   const energy_kT = totalEnergy(model.forces);
-  const separation_m = separationGrid(model.forces);
+  let separation_m: Float64Array | undefined;
   let features: CurveFeatures | undefined;
   let logRatio: number | undefined;
   return {
     first,
     second,
     model,
-    separation_m,
+    get separation_m() {
+      separation_m ??= separationGrid(model.forces);
+      return separation_m;
+    },
     get features() {
-      features ??= findFeatures(energy_kT, separation_m);
+      features ??= findFeatures(energy_kT, this.separation_m);
       return features;
     },
     get lnStabilityRatio() {

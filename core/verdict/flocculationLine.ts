@@ -27,6 +27,13 @@ export const reachableWell = ({ features }: SolvedPair): CurvePoint | null =>
 export const flocculationMargin = (pair: SolvedPair): number =>
   FLOCCULATED_DEPTH_kT + (reachableWell(pair)?.energy_kT ?? 0);
 
+/** Beyond a third the count of pairs alone says too little: triplets and networks form. */
+function shareInWords(pairedShare: number | null): string {
+  if (pairedShare === null) return '';
+  const words = pairedShare > 1 / 3 ? 'more than a third' : `about ${number(100 * pairedShare, 2)} %`;
+  return ` At this loading ${words} of the particles sit in it at any time.`;
+}
+
 function statement({ pair, pairedShare }: FlocculationCase): string {
   const well = reachableWell(pair);
   if (well === null) return 'No well outside the barrier: the particles do not cling to one another.';
@@ -34,10 +41,7 @@ function statement({ pair, pairedShare }: FlocculationCase): string {
   if (pair.features.barrier === null && pair.features.primaryMinimum !== null) {
     return `Nothing keeps the particles from contact, a well ${depth}: stirring will not part them.`;
   }
-  const share =
-    pairedShare === null
-      ? ''
-      : ` At this loading about ${number(100 * pairedShare, 2)} % of the particles sit in it at any time.`;
+  const share = shareInWords(pairedShare);
   if (-well.energy_kT < HARMLESS_DEPTH_kT) return `The outer well is ${depth}: heat alone parts the particles.${share}`;
   if (-well.energy_kT < FLOCCULATED_DEPTH_kT) {
     return `The outer well is ${depth}: loose, reversible flocs that stirring breaks; they raise the viscosity at rest and keep sediment soft.${share}`;

@@ -28,7 +28,11 @@ function saltLever(formulation: Formulation): LimitLever | null {
   const doses = formulation.salts.filter(({ concentration_mM }) => concentration_mM > 0);
   const total_mM = doses.reduce((sum, dose) => sum + dose.concentration_mM, 0);
   const name =
-    doses.length === 1 ? 'of the salt' : doses.length === 0 ? 'of added sodium chloride' : 'of all salts together';
+    doses.length === 1
+      ? 'salt concentration'
+      : doses.length === 0
+        ? 'concentration of added sodium chloride'
+        : 'concentration of all salts together';
   return {
     input: 'salt',
     name,
@@ -63,7 +67,7 @@ function zetaLever(formulation: Formulation, kinds: readonly number[]): LimitLev
   if (weakest === undefined || charge === null) return null;
   return {
     input: 'zeta',
-    name: 'of |ζ|',
+    name: '|ζ|',
     unit: 'mV',
     current: Math.abs(charge.zeta_mV),
     now: `${number(Math.abs(charge.zeta_mV))} mV`,
@@ -94,7 +98,7 @@ function layerLever(formulation: Formulation, kinds: readonly number[]): LimitLe
   const current_nm = layers.length === kinds.length ? (thinnest?.thickness_nm ?? 0) : 0;
   return {
     input: 'layerThickness',
-    name: thinnest === undefined ? 'of a swollen polymer layer (χ 0.4)' : 'of polymer layer',
+    name: thinnest === undefined ? 'swollen polymer layer (χ 0.4)' : 'polymer layer',
     unit: 'nm',
     current: current_nm === 0 ? TYPICAL_LAYER.thickness_nm : current_nm,
     now: current_nm === 0 ? 'none' : `${number(current_nm)} nm`,
@@ -124,7 +128,7 @@ function diameterLever(formulation: Formulation, kinds: readonly number[]): Limi
   const { diameter_nm } = formulation.particles[index];
   return {
     input: 'diameter',
-    name: 'in diameter',
+    name: 'diameter',
     unit: 'nm',
     current: diameter_nm,
     now: `${number(diameter_nm)} nm`,
@@ -138,7 +142,7 @@ function diameterLever(formulation: Formulation, kinds: readonly number[]): Limi
 function viscosityLever(formulation: Formulation, viscosity_mPa_s: number): LimitLever {
   return {
     input: 'viscosity',
-    name: 'of viscosity at rest',
+    name: 'viscosity at rest',
     unit: 'mPa·s',
     current: viscosity_mPa_s,
     now: `${number(viscosity_mPa_s)} mPa·s`,
@@ -184,17 +188,16 @@ export function leversFor(inputs: readonly LimitInput[], question: LeverQuestion
     .filter((lever) => lever !== null);
 }
 
-/** `Holds up to 35 mM salt (now 12 mM)`, `Needs at least 38 mV of |ζ| (now 20 mV)`, or that no value turns the answer. */
+/** `Holds up to a salt concentration of 35 mM (now 12 mM)`, `Needs a |ζ| of at least 38 mV (now 20 mV)`, or that none helps. */
 export function limitSentence(
   { name, unit, now, from, to, proviso }: LimitLever,
   found: { readonly value: number; readonly holds: 'above' | 'below' } | null,
   holdsNow: boolean,
 ): string {
-  if (found === null) return `No ${name} from ${number(from)} to ${number(to)} ${unit} makes this hold.`;
+  if (found === null) return `No ${name} between ${number(from)} and ${number(to)} ${unit} makes this hold.`;
   const bound = `${number(found.value)} ${unit}`;
   const aside = proviso === null ? `(now ${now})` : `(now ${now}; ${proviso})`;
-  const words = holdsNow
-    ? { above: 'Holds down to', below: 'Holds up to' }[found.holds]
-    : { above: 'Needs at least', below: 'Needs at most' }[found.holds];
-  return `${words} ${bound} ${name} ${aside}.`;
+  return holdsNow
+    ? `Holds ${found.holds === 'above' ? 'down' : 'up'} to a ${name} of ${bound} ${aside}.`
+    : `Needs a ${name} of at ${found.holds === 'above' ? 'least' : 'most'} ${bound} ${aside}.`;
 }

@@ -14,7 +14,7 @@ export interface TurningPoint {
   readonly holds: 'above' | 'below';
 }
 
-const STEPS_EACH_WAY = 14;
+const STEPS_EACH_WAY = 12;
 const RELATIVE_TOLERANCE = 1e-3;
 
 /** From `current` outwards to `end`: equal ratios where both are of one sign, equal steps otherwise. */
@@ -43,7 +43,7 @@ function bisect(search: LimitSearch, inside: number, outside: number, insidePosi
 /**
  * Value nearest to the current one (as a ratio) at which the margin changes sign, or null when it keeps its sign in
  * the whole range. Found on the full model by stepping outwards and bisecting to 0.1 %, so a limit is always a place
- * where both sides were evaluated; a window narrower than a step (1/14 of the way) can be missed.
+ * where both sides were evaluated; a window narrower than a step (1/12 of the way) can be missed.
  */
 export function nearestLimit(search: LimitSearch): TurningPoint | null {
   const { current, from, to } = search;

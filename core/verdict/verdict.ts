@@ -1,6 +1,7 @@
 import { pairedShare } from '../coagulation/wellOccupation';
 import type { PairEvaluation, ParticleState, Verdict } from '../evaluation';
 import type { PairDoubt } from '../formulation/doubt';
+import { formulationModel } from '../formulation/formulationModel';
 import { coagulationMarginOf } from '../formulation/pairRates';
 import { particleState } from '../formulation/particleState';
 import type { RequirementModel } from '../formulation/requirementModel';
@@ -59,6 +60,18 @@ const marginOf =
     return solved.ok ? margin(solved.value) : Number.NaN;
   };
 
+/** Settling asks nothing of the forces, so they are not worked out for it. */
+function settlingMarginOf(formulation: Formulation, requirement: RequirementModel): number {
+  const model = formulationModel(formulation);
+  if (!model.ok) return Number.NaN;
+  const { particles } = model.value;
+  return Math.min(
+    ...particles.map((particle) =>
+      settlingMargin(particleState(particle, model.value, requirement).settling, requirement),
+    ),
+  );
+}
+
 /** Three separate answers, each with its numbers, its margin and its limits; never one bare word. */
 export function verdict(question: VerdictQuestion): Verdict {
   const { formulation, solved, requirement, doubts, pairs, particles, weakestPair } = question;
@@ -97,17 +110,7 @@ export function verdict(question: VerdictQuestion): Verdict {
     settling: particles[settler].settling,
     requirement,
     viscosityMeasured: solved.model.medium.measured.includes('viscosity_Pa_s'),
-    limits: findLimits(
-      SETTLING_LEVERS,
-      lever([settler]),
-      marginOf(({ model }) =>
-        Math.min(
-          ...model.particles.map((particle) =>
-            settlingMargin(particleState(particle, model, requirement).settling, requirement),
-          ),
-        ),
-      ),
-    ),
+    limits: findLimits(SETTLING_LEVERS, lever([settler]), (changed) => settlingMarginOf(changed, requirement)),
   });
 
   const lines = [coagulation, flocculation, settling];

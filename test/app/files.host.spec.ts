@@ -70,6 +70,17 @@ test('what was saved outlives a power cut', async ({ desk }) => {
   expect(readFileSync(join(desk.documentsFolder, name ?? '')).equals(saved)).toBe(true);
 });
 
+test('a file named at the start is shown in place of the example', async ({ desk }) => {
+  const path = join(desk.documentsFolder, 'From the start.sunder.json');
+  const text = await desk.page.evaluate(async () => {
+    const example = await window.desk.exampleScenario();
+    return example.ok ? JSON.stringify({ ...example.value.scenario, title: 'Named at the start' }) : '';
+  });
+  writeFileSync(path, text);
+  await desk.reopen({ args: [path] });
+  await expect.poll(() => desk.page.title()).toBe('From the start — Sunder');
+});
+
 test('a ticket that the page made up opens and overwrites nothing', async ({ desk }) => {
   const target = join(desk.documentsFolder, 'Other.sunder.json');
   const answers = await desk.page.evaluate(async (path) => {

@@ -1,11 +1,20 @@
-import { existsSync } from 'node:fs';
+import { chmodSync, existsSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { electronBinary } from '../../main/commandLine/electronBinary.mjs';
+import { findBrowser } from '../../main/loopback/browser';
 import { expect, test } from './fixture';
-import { endProgram, environment, type Program, startProgram } from './hosts/host';
+import { endProgram, environment, type Folders, type Program, startProgram } from './hosts/host';
 import { printedAddress } from './hosts/loopbackHost';
 
 const withoutDisplay = { env: { DISPLAY: '', WAYLAND_DISPLAY: '' } };
+
+/** A program that ends at once, and not well. */
+function failing(folders: Folders, name: string): string {
+  const path = join(folders.all, name);
+  writeFileSync(path, '#!/bin/sh\nexit 3\n');
+  chmodSync(path, 0o755);
+  return path;
+}
 
 async function addressFrom(program: Program): Promise<string> {
   try {
@@ -25,6 +34,42 @@ test.describe('without Electron', { tag: '@loopback' }, () => {
     test.skip(electronBinary() !== null, 'Electron is here, so the start command has no need to fall back');
     const program = startProgram('main/commandLine/start.mjs', [], environment(folders, withoutDisplay));
     expect(new URL(await addressFrom(program)).hostname).toBe('127.0.0.1');
+  });
+
+  test('without a browser it serves until it is told to end', async ({ folders }) => {
+    const env = environment(folders, { env: { PATH: '', SUNDER_BROWSER: '', DISPLAY: ':4242' } });
+    test.skip(findBrowser(env) !== null, 'a browser is found here even without a search path');
+    const program = startProgram('dist/main/loopback.js', [], env);
+    const address = await printedAddress(program);
+    expect(program.said()).toContain('There is no browser');
+    const { status } = await fetch(address, { redirect: 'manual' });
+    expect(status).toBe(303);
+    program.child.kill('SIGINT');
+    expect(await program.ended).toBe(0);
+  });
+
+  test('a browser that opens no window is given up, and the address printed', async ({ folders }) => {
+    test.skip(process.platform === 'win32', 'the browser that fails is a shell script');
+    const env = environment(folders, { env: { SUNDER_BROWSER: failing(folders, 'browser'), DISPLAY: ':4242' } });
+    const program = startProgram('dist/main/loopback.js', [], env);
+    await addressFrom(program);
+    expect(program.said()).toContain('The browser window did not open');
+  });
+
+  test('an Electron that opens no window is given up for the browser', async ({ folders }) => {
+    test.skip(process.platform === 'win32', 'the Electron that fails is a shell script');
+    failing(folders, 'electron');
+    const env = environment(folders, {
+      env: {
+        ELECTRON_OVERRIDE_DIST_PATH: folders.all,
+        SUNDER_BROWSER: failing(folders, 'browser'),
+        SUNDER_HOST: '',
+        DISPLAY: ':4242',
+      },
+    });
+    const program = startProgram('main/commandLine/start.mjs', [], env);
+    expect(new URL(await addressFrom(program)).hostname).toBe('127.0.0.1');
+    expect(program.said()).toMatch(/Electron is not here \(it ended with code 3[^\n]*\n/);
   });
 
   test('whoever does not hold the key of the page is refused', async ({ desk }) => {

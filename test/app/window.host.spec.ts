@@ -33,24 +33,25 @@ test.describe('the window stays what it is', { tag: '@main-process' }, () => {
     expect(desk.requests.filter((url) => url.includes('foreign.example'))).toEqual([]);
   });
 
-  test('closing with unsaved work asks the page, and the page decides', async ({ desk }) => {
+  test('closing with unsaved work asks first; cancelled, it goes on; given up, it closes', async ({ desk }) => {
     const { page, evaluateInMain } = desk;
-    const asked = page.evaluate(async () => {
-      await window.desk.noteUnsaved(true, 'Trial');
-      return new Promise<string>((resolve) => {
-        window.desk.onWindowClosing(() => resolve('asked'));
-        document.title = 'listening';
+    const title = () => evaluateInMain?.(({ BrowserWindow }) => BrowserWindow.getAllWindows()[0]?.getTitle());
+    const close = () =>
+      evaluateInMain?.(({ BrowserWindow }) => {
+        BrowserWindow.getAllWindows()[0]?.close();
+        return BrowserWindow.getAllWindows().length;
       });
-    });
-    await expect.poll(() => page.title()).toBe('listening');
-    const left = await evaluateInMain?.(({ BrowserWindow }) => {
-      BrowserWindow.getAllWindows()[0]?.close();
-      return BrowserWindow.getAllWindows().length;
-    });
-    expect(await asked).toBe('asked');
-    expect(left).toBe(1);
+    await expect.poll(title).toMatch(/^[^*].* — Sunder$/);
+    await page.getByRole('button', { name: 'Duplicate' }).first().click();
+    await expect.poll(title).toMatch(/^\* .+ — Sunder$/);
+    expect(await close()).toBe(1);
+    const question = page.getByRole('dialog', { name: 'Save your changes?' });
+    await question.getByRole('button', { name: 'Cancel' }).click();
+    await expect(question).toBeHidden();
+    expect(await title()).toMatch(/^\* /);
+    expect(await close()).toBe(1);
     const gone = page.waitForEvent('close');
-    await page.evaluate(() => void window.desk.closeWindow());
+    await question.getByRole('button', { name: 'Don’t save' }).click();
     await gone;
   });
 

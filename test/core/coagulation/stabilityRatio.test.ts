@@ -40,8 +40,7 @@ describe('lnStabilityRatio against closed forms, without hydrodynamics', () => {
   it('is that of hydrodynamics alone, from a gap of 1e-4 radii (partial fractions)', () => {
     const { from, stabilityRatio } = cases.hydrodynamicIntegral;
     const ours = lnStabilityRatio({ ...spheres(1e-7), energy_kT: () => 0, contact_m: from * 1e-7 });
-    // Beyond 1e4 radii B is taken as 1 instead of 1 + 1.5 a/h: 1e-8 of W.
-    expect(deviation(ours, Math.log(stabilityRatio))).toBeLessThan(1e-7);
+    expect(deviation(ours, Math.log(stabilityRatio))).toBeLessThan(1e-9);
   });
 });
 
