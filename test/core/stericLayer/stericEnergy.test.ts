@@ -2,7 +2,9 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { BOLTZMANN_J_K } from '../../../core/constants';
 import { layerProperties } from '../../../core/stericLayer/layerProperties';
+import { oneSidedOsmoticEnergy } from '../../../core/stericLayer/oneSidedLayer';
 import { prepareStericLayer, type StericPair } from '../../../core/stericLayer/stericEnergy';
+import { elasticEnergy } from '../../../core/stericLayer/vincent1986';
 import cases from '../../reference/rates/cases.json';
 
 const deviation = (ours: number, theirs: number): number => Math.abs(ours / theirs - 1);
@@ -89,6 +91,16 @@ describe('prepareStericLayer', () => {
     expect(one.energy_J(5e-9)).toBeGreaterThan(0);
     expect(other.energy_J(5e-9)).toBe(one.energy_J(5e-9));
     expect(one.energy_J(5e-9)).toBeLessThan(prepared().energy_J(5e-9));
+  });
+
+  it('a single layer stores its own osmotic energy and half the elastic energy of two', () => {
+    const { volumeFraction, chains_per_m2 } = layerProperties(layer);
+    const overlap = { separation_m: 5e-9, meanRadius_m: 1e-7, thickness_m: layer.thickness_m, volumeFraction };
+    const osmotic_kT = oneSidedOsmoticEnergy(overlap, layer.floryChi, pair.solventMolecule_m3);
+    const elastic_kT = elasticEnergy(overlap, chains_per_m2) / 2;
+    expect(elastic_kT).toBeGreaterThan(0.01 * osmotic_kT);
+    const ours_kT = prepared({ layer2: null }).energy_J(5e-9) / (BOLTZMANN_J_K * pair.temperature_K);
+    expect(deviation(ours_kT, osmotic_kT + elastic_kT)).toBeLessThan(1e-12);
   });
 
   it('keeps mass, dry volume and chains of unlike layers, so that no pair comes out denser than dry polymer', () => {
