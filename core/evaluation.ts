@@ -74,6 +74,8 @@ export interface SettlingState {
   readonly timeToClear_s: number;
   readonly pecletNumber: number;
   readonly gravitationalLength_m: number;
+  /** Yield stress of the medium that would hold a single particle up for good. */
+  readonly suspendingYieldStress_Pa: number;
 }
 
 export interface PairEvaluation {
@@ -86,6 +88,8 @@ export interface PairEvaluation {
   readonly features: CurveFeatures;
   readonly rates: PairRates;
   readonly barrierDoubt: BarrierDoubt;
+  /** Polymer layer on each particle that, with no charge at all, would keep the attraction below 2 kT. */
+  readonly layerNeeded_m: number;
 }
 
 /** Energies against the gap between the bare surfaces; all arrays have the same length. */

@@ -1,3 +1,4 @@
+import { CONTACT_SEPARATION_m } from '../constants';
 import { barrierCaveats } from '../doubleLayer/barrierCaveats';
 import { insideValidity } from '../doubleLayer/doubleLayerChoice';
 import type { DoubleLayerReport, PairEvaluation } from '../evaluation';
@@ -5,11 +6,15 @@ import { findFeatures } from '../pairEnergy/curveFeatures';
 import { pairCurve } from '../pairEnergy/pairCurve';
 import { totalEnergy } from '../pairEnergy/pairForces';
 import { doubleLayerModels, type Formulation } from '../scenario/scenario';
+import { layerNeeded } from '../stericLayer/layerNeeded';
 import type { Caveat } from '../validity';
 import type { PairDoubt } from './doubt';
 import { pairModel } from './pairModel';
 import { pairRates } from './pairRates';
 import type { SolvedFormulation, SolvedPair } from './solve';
+
+/** Attraction that heat shakes apart at once: the harmless depth of an outer well (common practice). */
+const TOLERATED_DEPTH_kT = 2;
 
 /** Why no double layer acts, in words; empty when one does. */
 function noDoubleLayer(solved: SolvedFormulation, pair: SolvedPair): string {
@@ -81,6 +86,12 @@ export function pairEvaluation(
       features: pair.features,
       rates: pairRates({ solved, pair, requirement }),
       barrierDoubt: doubt.barrier,
+      layerNeeded_m: layerNeeded({
+        attraction_J: pair.model.forces.vanDerWaals_J,
+        thermalEnergy_J: solved.model.thermalEnergy_J,
+        toleratedDepth_kT: TOLERATED_DEPTH_kT,
+        contact_m: CONTACT_SEPARATION_m,
+      }),
     },
     caveats: [...pair.model.caveats, ...caveatsAtBarrier(doubleLayer, solved, pair)],
   };

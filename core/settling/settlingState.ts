@@ -3,6 +3,7 @@ import type { SettlingState } from '../evaluation';
 import { mustBePositive, mustNotBeNegative } from '../validity';
 import { hindrance } from './hinderedSettling';
 import { stokesVelocity } from './stokes';
+import { suspendingYieldStress } from './suspendingYieldStress';
 
 export interface SettlingQuestion {
   readonly radius_m: number;
@@ -48,5 +49,6 @@ export function settlingState(question: SettlingQuestion): SettlingState {
     timeToClear_s: (acceptedClearLayer * fillHeight_m) / Math.abs(hinderedVelocity_m_s),
     pecletNumber,
     gravitationalLength_m,
+    suspendingYieldStress_Pa: suspendingYieldStress(radius_m, densityDifference_kg_m3),
   };
 }

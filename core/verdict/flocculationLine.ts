@@ -1,7 +1,7 @@
 import type { CurvePoint, Limit, VerdictLine } from '../evaluation';
 import type { SolvedPair } from '../formulation/solve';
 import { levelOf } from './level';
-import { number } from './words';
+import { number, timeSpan } from './words';
 
 export const FLOCCULATION_LEVERS = ['salt', 'layerThickness', 'diameter'] as const;
 
@@ -17,6 +17,8 @@ export interface FlocculationCase {
   readonly depthDoubt_kT: number;
   /** Share of particles found in pairs at equilibrium in the well at this loading, 0 to 1; null when there is no well. */
   readonly pairedShare: number | null;
+  /** log₁₀ of the mean time [s] after which heat parts such a pair; null when there is no well to leave. */
+  readonly log10EscapeTime_s: number | null;
   readonly limits: readonly Limit[];
 }
 
@@ -27,6 +29,9 @@ export const reachableWell = ({ features }: SolvedPair): CurvePoint | null =>
 export const flocculationMargin = (pair: SolvedPair): number =>
   FLOCCULATED_DEPTH_kT + (reachableWell(pair)?.energy_kT ?? 0);
 
+const escapeInWords = (log10Time_s: number | null): string =>
+  log10Time_s === null ? '' : ` Left alone, a pair parts after ${timeSpan(log10Time_s)}.`;
+
 /** Beyond a third the count of pairs alone says too little: triplets and networks form. */
 function shareInWords(pairedShare: number | null): string {
   if (pairedShare === null) return '';
@@ -34,14 +39,14 @@ function shareInWords(pairedShare: number | null): string {
   return ` At this loading ${words} of the particles sit in it at any time.`;
 }
 
-function statement({ pair, pairedShare }: FlocculationCase): string {
+function statement({ pair, pairedShare, log10EscapeTime_s }: FlocculationCase): string {
   const well = reachableWell(pair);
   if (well === null) return 'No well outside the barrier: the particles do not cling to one another.';
   const depth = `${number(-well.energy_kT, 2)} kT deep at a gap of ${number(well.separation_m * 1e9, 2)} nm`;
   if (pair.features.barrier === null && pair.features.primaryMinimum !== null) {
     return `Nothing keeps the particles from contact, a well ${depth}: stirring will not part them.`;
   }
-  const share = shareInWords(pairedShare);
+  const share = `${escapeInWords(log10EscapeTime_s)}${shareInWords(pairedShare)}`;
   if (-well.energy_kT < HARMLESS_DEPTH_kT) return `The outer well is ${depth}: heat alone parts the particles.${share}`;
   if (-well.energy_kT < FLOCCULATED_DEPTH_kT) {
     return `The outer well is ${depth}: loose, reversible flocs that stirring breaks; they raise the viscosity at rest and keep sediment soft.${share}`;

@@ -47,7 +47,7 @@ export function settlingLine(one: SettlingCase): VerdictLine {
     ? `${particleName}: Brownian motion keeps it suspended over the whole fill height.`
     : time_days >= LONGEST_days
       ? `${particleName}: matched to the density of the medium, it neither settles nor rises.`
-      : `${particleName} ${way} by ${number(speed_mm_per_day, 2)} mm a day: ${layer} after ${timeSpan(Math.log10(time_days * S_PER_DAY))}, with no yield stress counted.`;
+      : `${particleName} ${way} by ${number(speed_mm_per_day, 2)} mm a day: ${layer} after ${timeSpan(Math.log10(time_days * S_PER_DAY))}; a yield stress of ${number(1000 * settling.suspendingYieldStress_Pa, 2)} mPa at rest, which is not counted, would hold it.`;
   return {
     subject: 'settling',
     level: levelOf(settlingMargin(settling, requirement), doubt, doubt),

@@ -1,3 +1,4 @@
+import { lnEscapeTime } from '../coagulation/wellEscape';
 import { pairedShare } from '../coagulation/wellOccupation';
 import type { PairEvaluation, ParticleState, Verdict } from '../evaluation';
 import type { PairDoubt } from '../formulation/doubt';
@@ -39,6 +40,23 @@ function shareInPairs({ model, features, separation_m, first, second }: SolvedPa
     to_m: separation_m[separation_m.length - 1],
     numberDensity_per_m3: model.first.numberDensity_per_m3,
   });
+}
+
+function escapeTime({ model: { temperature_K, medium } }: SolvedFormulation, pair: SolvedPair): number | null {
+  const { barrier, outerMinimum } = pair.features;
+  if (barrier === null || outerMinimum === null) return null;
+  const { first, second, forces } = pair.model;
+  const lnTime = lnEscapeTime({
+    energy_kT: totalEnergy(forces),
+    radius1_m: first.radius_m,
+    radius2_m: second.radius_m,
+    barrier_m: barrier.separation_m,
+    well_m: outerMinimum.separation_m,
+    parted_m: pair.separation_m[pair.separation_m.length - 1],
+    temperature_K,
+    viscosity_Pa_s: medium.viscosity_Pa_s,
+  });
+  return lnTime / Math.LN10;
 }
 
 /** The pair whose reachable well is deepest. */
@@ -97,6 +115,7 @@ export function verdict(question: VerdictQuestion): Verdict {
     pair: solved.pairs[clinging],
     depthDoubt_kT: doubts[clinging].outerMinimum_kT,
     pairedShare: shareInPairs(solved.pairs[clinging]),
+    log10EscapeTime_s: escapeTime(solved, solved.pairs[clinging]),
     limits: findLimits(
       FLOCCULATION_LEVERS,
       lever(kindsOf(solved.pairs[clinging])),

@@ -16,7 +16,8 @@ const YEAR_s = 365.25 * DAY_s;
 export function timeSpan(log10Time_s: number): string {
   if (log10Time_s > Math.log10(1000 * YEAR_s)) return 'more than 1000 years';
   const time_s = 10 ** log10Time_s;
-  if (time_s < 1) return 'less than a second';
+  if (time_s < 1e-3) return 'less than a millisecond';
+  if (time_s < 1) return `${number(1000 * time_s, 2)} milliseconds`;
   if (time_s < 2 * MINUTE_s) return `${number(time_s, 2)} seconds`;
   if (time_s < 2 * HOUR_s) return `${number(time_s / MINUTE_s, 2)} minutes`;
   if (time_s < 2 * DAY_s) return `${number(time_s / HOUR_s, 2)} hours`;

@@ -31,6 +31,8 @@ export interface DeskUnderTest {
   /** Ends the app and starts it again on the same folders. */
   readonly reopen: (options?: StartOptions) => Promise<void>;
   readonly kill: () => Promise<void>;
+  /** The exit code of the host, once it has ended. */
+  readonly ended: Promise<number | null>;
   readonly requests: readonly string[];
   readonly violations: readonly string[];
 }
@@ -81,6 +83,9 @@ export const test = base.extend<Fixtures>({
       },
       get requests() {
         return app.requests;
+      },
+      get ended() {
+        return app.ended;
       },
       get violations() {
         return app.violations;

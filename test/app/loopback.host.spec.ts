@@ -1,4 +1,4 @@
-import { chmodSync, existsSync, writeFileSync } from 'node:fs';
+import { chmodSync, existsSync, readdirSync, statSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { electronBinary } from '../../main/commandLine/electronBinary.mjs';
 import { findBrowser } from '../../main/loopback/browser';
@@ -100,6 +100,27 @@ test.describe('without Electron', { tag: '@loopback' }, () => {
       expect(facts).toMatchObject({ ok: true, value: { kind: 'loopback' } });
       expect(existsSync(join(folders.all, 'data'))).toBe(true);
       expect(await desk.page.evaluate(() => window.matchMedia('(display-mode: standalone)').matches)).toBe(true);
+    });
+
+    test('closing it ends the program and leaves no profile behind', async ({ desk, folders }) => {
+      const profiles = () => readdirSync(folders.temporary).filter((name) => name.startsWith('sunder-'));
+      expect(profiles()).toHaveLength(1);
+      expect(statSync(join(folders.temporary, profiles()[0] ?? '')).mode & 0o777).toBe(0o700);
+      await desk.page.close();
+      expect(await desk.ended).toBe(0);
+      expect(profiles()).toEqual([]);
+    });
+
+    test('with unsaved work the browser asks before it closes', async ({ desk }) => {
+      const { page } = desk;
+      await page.getByRole('button', { name: 'Duplicate' }).first().click();
+      await expect.poll(() => page.title()).toMatch(/^\* /);
+      const question = page.waitForEvent('dialog');
+      await page.close({ runBeforeUnload: true });
+      const asked = await question;
+      expect(asked.type()).toBe('beforeunload');
+      await asked.dismiss();
+      expect((await page.evaluate(() => window.desk.hostFacts())).ok).toBe(true);
     });
   });
 });

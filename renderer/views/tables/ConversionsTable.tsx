@@ -34,6 +34,14 @@ const particleRows = ({ particles }: FormulationEvaluation): readonly Row[] =>
     [`${particle.name}: settling alone`, particle.settling.stokesVelocity_m_s * MM_PER_DAY, 'mm/day'],
     [`${particle.name}: settling among others`, particle.settling.hinderedVelocity_m_s * MM_PER_DAY, 'mm/day'],
     [`${particle.name}: Péclet number of settling`, particle.settling.pecletNumber, ''],
+    [`${particle.name}: yield stress that would hold it up`, 1000 * particle.settling.suspendingYieldStress_Pa, 'mPa'],
+  ]);
+
+const pairRows = ({ pairs, particles }: FormulationEvaluation): readonly Row[] =>
+  pairs.map(({ first, second, layerNeeded_m }) => [
+    `${particles[first].name} – ${particles[second].name}: layer on each that would hold them without charge`,
+    nm_from_m(layerNeeded_m),
+    'nm',
   ]);
 
 /** The recipe in the terms the laws use. */
@@ -43,7 +51,7 @@ export function ConversionsTable() {
   if (result === null) return <p class="hint">No result yet.</p>;
   return (
     <div class="columns">
-      {[mediumRows(result), particleRows(result)].map((rows) => (
+      {[mediumRows(result), [...particleRows(result), ...pairRows(result)]].map((rows) => (
         <table class="numbers" key={rows[0][0]}>
           <caption class="visually-hidden">The recipe converted</caption>
           <tbody>

@@ -15,6 +15,7 @@ export async function startElectron(folders: Folders, options: StartOptions): Pr
     env: environment(folders, options),
     timeout: 30_000,
   });
+  const ended = new Promise<number | null>((resolve) => app.process().once('exit', resolve));
   const page = await app.firstWindow();
   const requests: string[] = [];
   const violations: string[] = [];
@@ -35,6 +36,7 @@ export async function startElectron(folders: Folders, options: StartOptions): Pr
       }, path),
     requests,
     violations,
+    ended,
     end: async () => {
       await evaluateInMain(({ app: main }) => main.exit(0)).catch(() => undefined);
       await app.close();

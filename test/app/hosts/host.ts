@@ -37,6 +37,8 @@ export interface RunningApp {
   /** Every address the page has asked for, as the app sees it. */
   readonly requests: string[];
   readonly violations: string[];
+  /** The exit code of the host, once it has ended. */
+  readonly ended: Promise<number | null>;
   readonly end: () => Promise<void>;
   /** As a power cut would: nothing of the app gets to say a last word. */
   readonly kill: () => Promise<void>;

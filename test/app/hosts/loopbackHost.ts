@@ -50,6 +50,7 @@ export async function startLoopback(folders: Folders, options: StartOptions, rea
       },
       requests,
       violations,
+      ended: program.ended,
       end: () => end(() => program.child.kill('SIGTERM')),
       kill: () => end(() => program.child.kill('SIGKILL')),
     };

@@ -78,6 +78,7 @@ export async function startStandIn(folders: Folders, options: StartOptions): Pro
       },
       requests,
       violations,
+      ended: program.ended,
       end: () => end(() => void evaluateInMain(({ app }) => app.exit(0)).catch(() => undefined)),
       // Main alone is killed: its browser has to go with it.
       kill: () => end(() => program.child.kill('SIGKILL')),

@@ -3,7 +3,8 @@ import { number, timeSpan } from '../../../core/verdict/words';
 
 describe('timeSpan', () => {
   it.each([
-    [-3, 'less than a second'],
+    [-4, 'less than a millisecond'],
+    [-2, '10 milliseconds'],
     [1, '10 seconds'],
     [Math.log10(7 * 60), '7 minutes'],
     [Math.log10(5 * 3600), '5 hours'],
