@@ -1,3 +1,5 @@
+import { brentRoot } from '../numerics/brentRoot';
+
 /** One input moved while all others stay: how far it may go before the answer turns. */
 export interface LimitSearch {
   /** Value now, in the unit of `from` and `to`. */
@@ -40,6 +42,20 @@ function bisect(search: LimitSearch, inside: number, outside: number, insidePosi
   return (near + far) / 2;
 }
 
+/** Where the margin is a number on both sides Brent's method needs a third of the evaluations of plain halving. */
+function turnBetween(search: LimitSearch, inside: number, outside: number, insidePositive: boolean): number {
+  const ends = [search.margin(inside), search.margin(outside)];
+  const tolerance = RELATIVE_TOLERANCE * Math.max(Math.abs(inside), Math.abs(outside));
+  const narrow = Math.abs(inside) > 0 && Math.abs(outside / inside) < 4 && Math.abs(outside / inside) > 0.25;
+  if (!narrow || !ends.every(Number.isFinite)) return bisect(search, inside, outside, insidePositive);
+  try {
+    return brentRoot(search.margin, inside, outside, tolerance);
+  } catch {
+    // A value in between that cannot be evaluated: it counts as failing, which halving can live with.
+    return bisect(search, inside, outside, insidePositive);
+  }
+}
+
 /**
  * Value nearest to the current one (as a ratio) at which the margin changes sign, or null when it keeps its sign in
  * the whole range. Found on the full model by stepping outwards and bisecting to 0.1 %, so a limit is always a place
@@ -55,7 +71,7 @@ export function nearestLimit(search: LimitSearch): TurningPoint | null {
     for (const value of outward(current, end)) {
       const holds = search.margin(value) > 0;
       if (holds !== holdsNow) {
-        const limit = bisect(search, previous, value, holdsNow);
+        const limit = turnBetween(search, previous, value, holdsNow);
         const currentSide = end > current ? 'below' : 'above';
         found.push({ value: limit, holds: holdsNow ? currentSide : currentSide === 'below' ? 'above' : 'below' });
         break;
