@@ -1,17 +1,34 @@
-import { surfacePotentialFromZeta } from '../doubleLayer/slipPlane';
-import type { MediumState, ParticleState } from '../evaluation';
+import { barePotential } from '../doubleLayer/barePotential';
+import type { MediumState, ParticleState, SettlingState } from '../evaluation';
 import { settlingState } from '../settling/settlingState';
 import type { FormulationModel, ParticleModel } from './formulationModel';
 import type { RequirementModel } from './requirementModel';
 
 function surfacePotential(particle: ParticleModel, medium: MediumState): number | null {
   if (particle.charge === null || medium.debyeLength_m === null) return null;
-  return surfacePotentialFromZeta({
+  return barePotential({
+    ions: medium.ions,
     zeta_V: particle.charge.zeta_V,
     slipPlane_m: particle.charge.slipPlane_m,
     inverseDebyeLength_per_m: 1 / medium.debyeLength_m,
     temperature_K: medium.temperature_K,
-    valence: 1,
+  });
+}
+
+/** How one kind of particle settles in the medium at rest, among all the others. */
+export function particleSettling(
+  { radius_m, density_kg_m3 }: ParticleModel,
+  { medium, temperature_K, particles }: FormulationModel,
+  requirement: RequirementModel,
+): SettlingState {
+  return settlingState({
+    radius_m,
+    densityDifference_kg_m3: density_kg_m3 - medium.density_kg_m3,
+    viscosity_Pa_s: medium.viscosity_Pa_s,
+    temperature_K,
+    volumeFraction: particles.reduce((sum, one) => sum + one.volumeFraction, 0),
+    fillHeight_m: requirement.fillHeight_m,
+    acceptedClearLayer: requirement.acceptedClearLayer,
   });
 }
 
@@ -21,9 +38,8 @@ export function particleState(
   model: FormulationModel,
   requirement: RequirementModel,
 ): ParticleState {
-  const { medium, temperature_K } = model;
+  const { medium } = model;
   const { charge, layer, name, radius_m, density_kg_m3, volumeFraction, massFraction, numberDensity_per_m3 } = particle;
-  const solids = model.particles.reduce((sum, one) => sum + one.volumeFraction, 0);
   return {
     name,
     radius_m,
@@ -37,14 +53,6 @@ export function particleState(
     layerThickness_m: layer?.thickness_m ?? 0,
     layerVolumeFraction:
       layer === null ? null : layer.adsorbedAmount_kg_m2 / (layer.polymerDensity_kg_m3 * layer.thickness_m),
-    settling: settlingState({
-      radius_m,
-      densityDifference_kg_m3: density_kg_m3 - medium.density_kg_m3,
-      viscosity_Pa_s: medium.viscosity_Pa_s,
-      temperature_K,
-      volumeFraction: solids,
-      fillHeight_m: requirement.fillHeight_m,
-      acceptedClearLayer: requirement.acceptedClearLayer,
-    }),
+    settling: particleSettling(particle, model, requirement),
   };
 }

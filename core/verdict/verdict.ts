@@ -4,7 +4,7 @@ import type { PairEvaluation, ParticleState, Verdict } from '../evaluation';
 import type { PairDoubt } from '../formulation/doubt';
 import { formulationModel } from '../formulation/formulationModel';
 import { coagulationMarginOf } from '../formulation/pairRates';
-import { particleState } from '../formulation/particleState';
+import { particleSettling } from '../formulation/particleState';
 import type { RequirementModel } from '../formulation/requirementModel';
 import { type SolvedFormulation, type SolvedPair, solve } from '../formulation/solve';
 import { totalEnergy } from '../pairEnergy/pairForces';
@@ -84,9 +84,7 @@ function settlingMarginOf(formulation: Formulation, requirement: RequirementMode
   if (!model.ok) return Number.NaN;
   const { particles } = model.value;
   return Math.min(
-    ...particles.map((particle) =>
-      settlingMargin(particleState(particle, model.value, requirement).settling, requirement),
-    ),
+    ...particles.map((particle) => settlingMargin(particleSettling(particle, model.value, requirement), requirement)),
   );
 }
 

@@ -19,7 +19,7 @@ const members = {
   onWindowClosing: true,
 } satisfies Record<keyof Desk, true>;
 
-test('the page finds the bridge of the contract, complete', async ({ desk }) => {
+test('the page finds the bridge of the contract, complete', async ({ sharedDesk: desk }) => {
   const [names, kinds] = await desk.page.evaluate(() => [
     Object.keys(window.desk).sort(),
     [...new Set(Object.values(window.desk).map((member) => typeof member))],
@@ -30,7 +30,7 @@ test('the page finds the bridge of the contract, complete', async ({ desk }) => 
   expect(facts).toMatchObject({ ok: true, value: { kind: desk.project === 'loopback' ? 'loopback' : 'electron' } });
 });
 
-test('the bridge cannot be changed or replaced', async ({ desk }) => {
+test('the bridge cannot be changed or replaced', async ({ sharedDesk: desk }) => {
   const changed = await desk.page.evaluate(() => {
     const before = window.desk;
     const tried = [
@@ -45,7 +45,7 @@ test('the bridge cannot be changed or replaced', async ({ desk }) => {
   expect(changed).toEqual({ tried: [false, false, false, false, false], same: true });
 });
 
-test('the page has no Node and no channel of its own', async ({ desk }) => {
+test('the page has no Node and no channel of its own', async ({ sharedDesk: desk }) => {
   const seen = await desk.page.evaluate(() =>
     ['require', 'process', 'module', 'Buffer', 'global', 'ipcRenderer', 'electron', '__dirname'].filter(
       (name) => name in globalThis,

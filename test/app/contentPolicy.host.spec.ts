@@ -1,16 +1,18 @@
+import { pageHeaders } from '../../main/bridge/contentPolicy';
 import { expect, test } from './fixture';
 
 const FOREIGN = 'https://foreign.example/collect';
 
-test('the policy comes with the page and loads nothing from elsewhere', async ({ desk }) => {
+test('the policy comes with the page and loads nothing from elsewhere', async ({ sharedDesk: desk }) => {
   const headers = await desk.page.evaluate(async () => Object.fromEntries((await fetch('./index.html')).headers));
-  expect(headers['content-security-policy']).toContain("default-src 'none'");
-  expect(headers['content-security-policy']).toContain("script-src 'self'");
-  expect(headers['content-security-policy']).not.toMatch(/unsafe|https?:|\*/);
-  expect(headers['x-content-type-options']).toBe('nosniff');
+  for (const [name, value] of Object.entries(pageHeaders)) expect(headers[name.toLowerCase()]).toBe(value);
+  const policy = headers['content-security-policy'];
+  expect(policy).toContain("default-src 'none'");
+  expect(policy).toContain("script-src 'self'");
+  expect(policy).not.toMatch(/unsafe|https?:|\*/);
 });
 
-test('an inline script does not run', async ({ desk }) => {
+test('an inline script does not run', async ({ sharedDesk: desk }) => {
   const ran = await desk.page.evaluate(() => {
     const script = document.createElement('script');
     script.append('window.planted = true;');
@@ -22,7 +24,7 @@ test('an inline script does not run', async ({ desk }) => {
   await expect.poll(() => desk.violations.join()).toMatch(/^(script-src|require-trusted-types-for)/);
 });
 
-test('text is not run as code', async ({ desk }) => {
+test('text is not run as code', async ({ sharedDesk: desk }) => {
   // From a timer: a call made by the test itself would be excused from the policy.
   const outcome = await desk.page.evaluate(
     () =>
@@ -39,7 +41,7 @@ test('text is not run as code', async ({ desk }) => {
   expect(outcome).toBe('EvalError');
 });
 
-test('nothing is fetched from elsewhere', async ({ desk }) => {
+test('nothing is fetched from elsewhere', async ({ sharedDesk: desk }) => {
   const outcomes = await desk.page.evaluate(async (address) => {
     const image = new Image();
     const shown = new Promise((resolve) => {
@@ -57,7 +59,7 @@ test('nothing is fetched from elsewhere', async ({ desk }) => {
   await expect.poll(() => desk.violations.filter((text) => text.includes('foreign.example')).length).toBe(2);
 });
 
-test('a start asks for nothing outside the app', async ({ desk }) => {
+test('a start asks for nothing outside the app', async ({ sharedDesk: desk }) => {
   const own = new URL(desk.page.url()).origin;
   await desk.page.reload();
   await expect.poll(() => desk.page.evaluate(() => 'desk' in window)).toBe(true);

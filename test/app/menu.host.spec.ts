@@ -10,7 +10,7 @@ const listen = (page: Page): Promise<void> =>
   });
 const heard = (page: Page): Promise<string[]> => page.evaluate(() => Reflect.get(window, 'heard'));
 
-test('a click in the menu reaches the page', { tag: '@main-process' }, async ({ desk }) => {
+test('a click in the menu reaches the page', { tag: '@main-process' }, async ({ sharedDesk: desk }) => {
   await listen(desk.page);
   await desk.evaluateInMain?.(({ Menu }) => {
     for (const id of ['save', 'undo', 'about']) Menu.getApplicationMenu()?.getMenuItemById(id)?.click();
@@ -18,7 +18,7 @@ test('a click in the menu reaches the page', { tag: '@main-process' }, async ({ 
   await expect.poll(() => heard(desk.page)).toEqual(['save', 'undo', 'about']);
 });
 
-test('its keys reach the page', { tag: '@stand-in' }, async ({ desk }) => {
+test('its keys reach the page', { tag: '@stand-in' }, async ({ sharedDesk: desk }) => {
   await listen(desk.page);
   await desk.page.evaluate(() => {
     document.body.tabIndex = -1;
@@ -31,7 +31,7 @@ test('its keys reach the page', { tag: '@stand-in' }, async ({ desk }) => {
   await expect.poll(() => heard(desk.page)).toEqual(['save', 'save-as']);
 });
 
-test('a listener that was taken away hears no more', { tag: '@main-process' }, async ({ desk }) => {
+test('a listener that was taken away hears no more', { tag: '@main-process' }, async ({ sharedDesk: desk }) => {
   await desk.page.evaluate(() => window.desk.onMenuCommand(() => document.body.setAttribute('data-late', ''))());
   await listen(desk.page);
   await desk.evaluateInMain?.(({ Menu }) => Menu.getApplicationMenu()?.getMenuItemById('save')?.click());

@@ -29,7 +29,7 @@ const hostileAddresses = [
 ];
 
 test.describe('a request is heard from the page in the window only', { tag: '@main-process' }, () => {
-  test('every channel of the contract is there, and no other', async ({ desk }) => {
+  test('every channel of the contract is there, and no other', async ({ sharedDesk: desk }) => {
     const there = await desk.evaluateInMain?.(({ ipcMain }) => {
       const handlers: Map<string, unknown> = Reflect.get(ipcMain, '_invokeHandlers');
       return [...handlers.keys()].sort();
@@ -37,7 +37,7 @@ test.describe('a request is heard from the page in the window only', { tag: '@ma
     expect(there).toEqual(channels);
   });
 
-  test('every hostile sender is refused on every channel', async ({ desk }) => {
+  test('every hostile sender is refused on every channel', async ({ sharedDesk: desk }) => {
     const heard = await desk.evaluateInMain?.(async ({ ipcMain, BrowserWindow }, addresses) => {
       const handlers: Map<string, (event: object, ...args: unknown[]) => unknown> = Reflect.get(
         ipcMain,
@@ -71,7 +71,7 @@ test.describe('a request is heard from the page in the window only', { tag: '@ma
   });
 });
 
-test('no permission is given but writing to the clipboard', { tag: '@stand-in' }, async ({ desk }) => {
+test('no permission is given but writing to the clipboard', { tag: '@stand-in' }, async ({ sharedDesk: desk }) => {
   const given = await desk.evaluateInMain?.(({ session }) => {
     const handlers = Reflect.get(session.defaultSession, 'permissionHandlers');
     const wanted = ['media', 'geolocation', 'notifications', 'midi', 'fullscreen', 'openExternal', 'clipboard-read'];

@@ -1,7 +1,7 @@
 import { expect, test } from './fixture';
 
 test.describe('the window stays what it is', { tag: '@main-process' }, () => {
-  test('it goes to no other page', async ({ desk }) => {
+  test('it goes to no other page', async ({ sharedDesk: desk }) => {
     const { page } = desk;
     const before = page.url();
     for (const address of ['https://foreign.example/', 'http://127.0.0.1:9/', 'file:///etc/hostname']) {
@@ -18,7 +18,7 @@ test.describe('the window stays what it is', { tag: '@main-process' }, () => {
     expect(desk.requests.filter((url) => /foreign\.example|127\.0\.0\.1:9|^file:/.test(url))).toEqual([]);
   });
 
-  test('it opens no other window', async ({ desk }) => {
+  test('it opens no other window', async ({ sharedDesk: desk }) => {
     const opened = await desk.page.evaluate(() => {
       const link = document.createElement('a');
       link.href = 'https://foreign.example/';
