@@ -41,15 +41,15 @@ export interface FileActions {
 const EXTENSION = '.sunder.json';
 
 /** A file name made of the title: what any file system takes. */
-export const fileNameOf = (title: string): string =>
-  `${
-    title
-      .replace(/[^\p{L}\p{N} ._-]+/gu, ' ')
-      .replace(/\s+/g, ' ')
-      .trim()
-      .replace(/^\.+|\.+$/g, '')
-      .slice(0, 60) || 'Scenario'
-  }${EXTENSION}`;
+export function fileNameOf(title: string): string {
+  const plain = title
+    .replace(/[^\p{L}\p{N} ._-]+/gu, ' ')
+    .replace(/\s+/g, ' ')
+    .replace(/^[. ]+/, '')
+    .slice(0, 60)
+    .replace(/[. ]+$/, '');
+  return `${plain === '' ? 'Scenario' : plain}${EXTENSION}`;
+}
 
 export function createFileActions(desk: Desk, workbench: Workbench): FileActions {
   const facts = signal<HostFacts | null>(null);

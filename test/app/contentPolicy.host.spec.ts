@@ -59,6 +59,34 @@ test('nothing is fetched from elsewhere', async ({ sharedDesk: desk }) => {
   await expect.poll(() => desk.violations.filter((text) => text.includes('foreign.example')).length).toBe(2);
 });
 
+test('no address leads out of the folder of the page', async ({ sharedDesk: desk }) => {
+  const statuses = await desk.page.evaluate(
+    (paths) =>
+      Promise.all(
+        paths.map((path) =>
+          fetch(path)
+            .then((answer) => answer.status)
+            .catch(() => 0),
+        ),
+      ),
+    [
+      '/index.html',
+      '/..%2fmain/main.js',
+      '/%2e%2e/%2e%2e/package.json',
+      '/..%5c..%5cpackage.json',
+      '/assets/..%00.js',
+      '/assets/..%2f..%2fmain%2fpreload.cjs',
+      '/%252e%252e/package.json',
+      '/index.html::$DATA',
+      '/%E0%A4%A',
+      '/assets/',
+      '//etc/passwd',
+    ],
+  );
+  expect(statuses[0]).toBe(200);
+  expect(statuses.slice(1).filter((status) => status !== 404 && status !== 0)).toEqual([]);
+});
+
 test('a start asks for nothing outside the app', async ({ sharedDesk: desk }) => {
   const own = new URL(desk.page.url()).origin;
   await desk.page.reload();

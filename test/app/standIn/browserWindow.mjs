@@ -41,6 +41,11 @@ const WITHOUT_EFFECT_HERE = ['preload', 'spellcheck', 'devTools', 'session', 'ad
   ],
 );
 
+const WINDOW_OPTIONS = [
+  ...['width', 'height', 'minWidth', 'minHeight', 'x', 'y', 'show', 'title', 'backgroundColor', 'icon'],
+  ...['name', 'windowStatePersistence', 'autoHideMenuBar', 'webPreferences'],
+];
+
 /** @param {Record<string, unknown>} preferences */
 function refuseWeak(preferences) {
   onlyKnown('webPreferences', preferences, [
@@ -69,6 +74,7 @@ class Window extends EventEmitter {
   /** @param {Record<string, unknown> & { webPreferences?: Record<string, unknown> }} options */
   constructor(options) {
     super();
+    onlyKnown('BrowserWindow', options, WINDOW_OPTIONS);
     const { webPreferences: preferences = {} } = options;
     refuseWeak(preferences);
     this.#bounds = { x: 0, y: 0, width: Number(options.width ?? 800), height: Number(options.height ?? 600) };
