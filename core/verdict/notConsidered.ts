@@ -19,6 +19,11 @@ export function notConsidered(formulation: Formulation, solids: number): readonl
   if (formulation.particles.some(({ layer }) => layer !== null)) {
     blind.push('Desorption of the dispersant on dilution or heating, and the change of χ with temperature.');
   }
+  if (formulation.medium.measuredViscosity_mPa_s !== null) {
+    blind.push(
+      'The measured viscosity is taken to slow encounters as well as settling. In a network of thickener particles may meet faster than that; each factor of ten asks for 2.3 kT more barrier.',
+    );
+  }
   if (solids > 0.3) {
     blind.push(
       'Crowding: above about 30 % by volume every particle has many neighbours at once, and pair energies understate both attraction and attempts.',

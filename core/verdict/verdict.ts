@@ -1,6 +1,6 @@
 import { lnEscapeTime } from '../coagulation/wellEscape';
 import { pairedShare } from '../coagulation/wellOccupation';
-import type { PairEvaluation, ParticleState, Verdict } from '../evaluation';
+import type { CurvePoint, PairEvaluation, ParticleState, Verdict } from '../evaluation';
 import type { PairDoubt } from '../formulation/doubt';
 import { formulationModel } from '../formulation/formulationModel';
 import { coagulationMarginOf } from '../formulation/pairRates';
@@ -42,6 +42,17 @@ function shareInPairs({ model, features, separation_m, first, second }: SolvedPa
   });
 }
 
+/** A pair counts as parted where a tenth of the well's depth is left: farther out the time is that of a long walk. */
+const PARTED_SHARE = 0.1;
+
+function partedGap({ separation_m, model: { forces } }: SolvedPair, well: CurvePoint): number {
+  const energy_kT = totalEnergy(forces);
+  const beyond = separation_m.find(
+    (gap_m) => gap_m > well.separation_m && energy_kT(gap_m) > PARTED_SHARE * well.energy_kT,
+  );
+  return beyond ?? separation_m[separation_m.length - 1];
+}
+
 function escapeTime({ model: { temperature_K, medium } }: SolvedFormulation, pair: SolvedPair): number | null {
   const { barrier, outerMinimum } = pair.features;
   if (barrier === null || outerMinimum === null) return null;
@@ -52,7 +63,7 @@ function escapeTime({ model: { temperature_K, medium } }: SolvedFormulation, pai
     radius2_m: second.radius_m,
     barrier_m: barrier.separation_m,
     well_m: outerMinimum.separation_m,
-    parted_m: pair.separation_m[pair.separation_m.length - 1],
+    parted_m: partedGap(pair, outerMinimum),
     temperature_K,
     viscosity_Pa_s: medium.viscosity_Pa_s,
   });

@@ -64,8 +64,7 @@ export function MediumGroup() {
   const decimalSign = useSettings().decimalSign.value;
   const { medium, temperature_degC } = recipe.formulation;
   const state = recipe.outcome?.kind === 'evaluated' ? recipe.outcome.result.medium : null;
-  const computed = (value: number | null): string =>
-    value === null ? '' : `computed ${shortNumber(value, decimalSign)}`;
+  const computed = (value: number | null): string => (value === null ? '' : `≈ ${shortNumber(value, decimalSign)}`);
   const measured = (key: Measured) => ({
     value: medium[key],
     optional: true,

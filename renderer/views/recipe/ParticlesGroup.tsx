@@ -73,7 +73,7 @@ function Kind({ particle, index }: { particle: Particle; index: number }) {
         kind="density_kg_m3"
         optional
         value={particle.density_kg_m3}
-        placeholder={state === undefined ? '' : `handbook ${shortNumber(state.density_kg_m3, decimalSign, 4)}`}
+        placeholder={state === undefined ? '' : `≈ ${shortNumber(state.density_kg_m3, decimalSign, 4)}`}
         was={recipe.wasAt(`${path}/density_kg_m3`)}
         onCommit={(value) => set('Change density', 'density_kg_m3', { density_kg_m3: value })}
       />

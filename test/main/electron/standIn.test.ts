@@ -70,7 +70,6 @@ const classes = [
   ['webContents.mjs', 'WebContents', 'WebContents'],
   ['ipcMain.mjs', 'IpcMain', 'IpcMain'],
   ['protocol.mjs', 'Session', 'Session'],
-  ['menu.mjs', 'MenuItem', 'MenuItem'],
   ['menu.mjs', 'Menu', 'Menu'],
 ] as const;
 
