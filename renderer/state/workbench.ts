@@ -62,16 +62,20 @@ export function createWorkbench(start: OpenFile, evaluateInWorker: Evaluator, cl
   });
 
   let newest = 0;
+  /** Answers up to this question are of no use: a newer one is shown, or another file. */
+  let shown = 0;
   const close = effect(() => {
     const question = scenario.value;
     newest += 1;
-    const asked = newest; // an answer to an older question is dropped
+    const asked = newest;
     evaluationState.value = { kind: 'computing' };
     evaluateInWorker(question).then(
       (answer) => {
-        if (asked !== newest) return;
+        // While a slider is dragged answers lag behind; each is shown as long as it is newer than the last.
+        if (asked <= shown) return;
+        shown = asked;
         evaluation.value = answer;
-        evaluationState.value = { kind: 'done' };
+        if (asked === newest) evaluationState.value = { kind: 'done' };
       },
       (fault: unknown) => {
         if (asked !== newest) return;
@@ -116,6 +120,8 @@ export function createWorkbench(start: OpenFile, evaluateInWorker: Evaluator, cl
       history.value = redone(history.peek());
     },
     load: (opened) => {
+      shown = newest;
+      evaluation.value = null;
       history.value = startHistory(opened.scenario);
       saved.value = opened.scenario;
       file.value = { ticket: opened.ticket, displayName: opened.displayName };

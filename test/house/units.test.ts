@@ -45,8 +45,13 @@ const dimensionless = new Set([
   ],
   ...['valence', 'strength', 'floryChi', 'pH', 'pKw', 'layerVolumeFraction', 'volumeParts'],
   ...['relativeUncertainty', 'acrossVacuum', 'acrossLiquid', 'kappaRadius', 'pecletNumber'],
-  ...['lnStabilityRatio',
-  'lnRequiredStabilityRatio', 'log10StabilityRatio', 'requiredLog10StabilityRatio', 'standardUncertaintyLog10W'],
+  ...[
+    'lnStabilityRatio',
+    'lnRequiredStabilityRatio',
+    'log10StabilityRatio',
+    'requiredLog10StabilityRatio',
+    'standardUncertaintyLog10W',
+  ],
   ...['log10HalfLife_s'], // a logarithm, of the unit named
   ...['permittivity', 'mediumPermittivity', 'measuredRelativePermittivity', 'polarizabilityDensity', 'hamakerScale'],
   ...['fraction', 'share', 'pairedShare', 'hamakerShare', 'solids', 'acceptedLoss', 'acceptedClearLayer'],

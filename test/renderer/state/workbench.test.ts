@@ -45,6 +45,24 @@ describe('evaluation follows the scenario', () => {
     expect(workbench.evaluation.value).toBe(newest);
   });
 
+  it('shows an answer that lags behind, as not the last word', async () => {
+    const { workbench, asked, rest } = trial();
+    title(workbench, 'one');
+    const first = empty();
+    asked[0].resolve(first);
+    await rest();
+    expect(workbench.evaluation.value).toBe(first);
+    expect(workbench.evaluationState.value.kind).toBe('computing');
+  });
+
+  it('drops the answer to a question about another file', async () => {
+    const { workbench, asked, rest } = trial();
+    workbench.load({ ticket: null, displayName: 'b', scenario: { ...newScenario(), title: 'loaded' } });
+    asked[0].resolve(empty());
+    await rest();
+    expect(workbench.evaluation.value).toBeNull();
+  });
+
   it('keeps the last answer and says so when a calculation fails', async () => {
     const { workbench, asked, rest } = trial();
     const first = empty();
