@@ -74,6 +74,7 @@ export function Picker({ label, options, value, onPick, was, hiddenLabel = false
         id={id}
         class="field-input field-text"
         type="text"
+        data-typing={open ? 'true' : undefined}
         role="combobox"
         autocomplete="off"
         spellcheck={false}

@@ -75,6 +75,7 @@ export function QuantityField(props: QuantityFieldProps) {
           id={id}
           class="field-input"
           type="text"
+          data-typing={typed === null ? undefined : 'true'}
           inputMode="decimal"
           autocomplete="off"
           spellcheck={false}

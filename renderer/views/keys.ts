@@ -46,9 +46,8 @@ export const otherKeys: readonly (readonly [string, string])[] = [
   ['← →, Home, End, Page Up, Page Down', 'Move the read-out along the curve, or a slider'],
 ];
 
-/** In a text field the browser's own undo comes first, as long as the text there has been changed. */
+/** While a text is being typed, undo is the browser's and undoes typing; once it was read, undo is ours. */
 export const belongsToText = (event: KeyboardEvent): boolean =>
   event.target instanceof HTMLInputElement &&
-  event.target.type === 'text' &&
-  event.target.value !== event.target.defaultValue &&
-  event.key.toLowerCase() === 'z';
+  event.target.dataset.typing === 'true' &&
+  ['z', 'y'].includes(event.key.toLowerCase());

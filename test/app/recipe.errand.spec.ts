@@ -75,6 +75,21 @@ test('every step can be undone and done again', async ({ desk }) => {
   await expect.poll(() => barrierOf(desk, 'Water, polyacrylate')).toBeGreaterThan(before);
 });
 
+test('in a field Ctrl+Z undoes typing first, then the last step', async ({ desk }) => {
+  await bench(desk);
+  const temperature = field(desk, 'Temperature');
+  await temperature.fill('31');
+  await temperature.press('Enter');
+  await temperature.press('End');
+  await temperature.pressSequentially('5');
+  await expect(temperature).toHaveValue('315');
+  await temperature.press('Control+z');
+  await expect(temperature).not.toHaveValue('315');
+  await temperature.press('Escape');
+  await temperature.press('Control+z');
+  await expect(temperature).toHaveValue('25');
+});
+
 test('another material is found by a part of its name', async ({ desk }) => {
   await bench(desk);
   const material = desk.page.getByRole('combobox', { name: 'Material' });
