@@ -8,6 +8,8 @@ import {
   outsideParticleRange,
   overlapSentence,
 } from './doubleLayerValidity';
+import { flatEffectivePotential } from './effectivePotential';
+import type { Ion } from './reducedField';
 import { thermalVoltage } from './thermalVoltage';
 
 export interface ChargedPair {
@@ -17,6 +19,8 @@ export interface ChargedPair {
   /** Radius of the smaller particle over the Debye length. */
   readonly kappaRadiusSmaller: number;
   readonly temperature_K: number;
+  /** All ions of the medium, neutral together. */
+  readonly ions: readonly Ion[];
 }
 
 export interface DoubleLayerChoice {
@@ -28,7 +32,20 @@ export interface DoubleLayerChoice {
 
 /** Below this κa the flat-surface geometry of the linear models is out of the question: Bell, Levine & McCartney 1970. */
 const CURVED_BELOW = 5;
-function byValidity({ potential1_V, potential2_V, kappaRadiusSmaller, temperature_K }: ChargedPair) {
+/** Far-field potential and zeta may differ by this share in the linear theory; 2 % in a 1:1 salt at its upper end. */
+const LINEAR_WITHIN = 0.05;
+
+/** Multivalent ions bend the double layer at lower potentials than the limit of one-valued ones. */
+function isLinear({ ions, temperature_K, potential1_V, potential2_V }: ChargedPair): boolean {
+  return [potential1_V, potential2_V].every((potential_V) => {
+    if (potential_V === 0) return true;
+    const { effectivePotential_V } = flatEffectivePotential({ ions, potential_V, temperature_K });
+    return Math.abs(effectivePotential_V / potential_V - 1) <= LINEAR_WITHIN;
+  });
+}
+
+function byValidity(pair: ChargedPair) {
+  const { potential1_V, potential2_V, kappaRadiusSmaller, temperature_K } = pair;
   const linear = doubleLayerValidity['constant-potential'];
   const limit_V = linear.reducedPotential.to * thermalVoltage(temperature_K);
   const highest_V = Math.max(Math.abs(potential1_V), Math.abs(potential2_V));
@@ -49,6 +66,12 @@ function byValidity({ potential1_V, potential2_V, kappaRadiusSmaller, temperatur
     return {
       model: 'superposition',
       reason: `Superposition, because ${size}, below the ${linear.kappaRadius.from} that the linear models need.`,
+    } as const;
+  }
+  if (!isLinear(pair)) {
+    return {
+      model: 'superposition',
+      reason: `Superposition, because the ions of higher charge make the double layer non-linear already at ${inMillivolts(highest_V)}.`,
     } as const;
   }
   return {
@@ -74,8 +97,8 @@ function caveatsOf(model: DoubleLayerModel, pair: ChargedPair): Caveat[] {
 /**
  * Which formula for the double-layer energy covers a case.
  *
- * `by-validity`: κa below 5, superposition with curvature; both |ψ| up to kT/e (25.7 mV at 25 °C) and κa of at least 10,
- * constant potential; superposition otherwise. A model chosen by hand is obeyed, with a caveat where it is out of range.
+ * `by-validity`: κa below 5, superposition with curvature; both |ψ| up to kT/e (25.7 mV at 25 °C), κa of at least 10 and
+ * far-field potentials within 5 % of zeta, constant potential; superposition otherwise. A model chosen by hand is obeyed, with a caveat where it is out of range.
  *
  * Source  ranges as in {@link doubleLayerValidity}; the order of preference is ours.
  * Throws  RangeError for a non-finite potential, or another input that is not positive.

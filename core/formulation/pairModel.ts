@@ -41,6 +41,7 @@ function doubleLayerOf(model: FormulationModel, first: ParticleModel, second: Pa
     potential2_V: second.charge.zeta_V,
     kappaRadiusSmaller: Math.min(first.radius_m, second.radius_m) / debyeLength_m,
     temperature_K: model.temperature_K,
+    ions,
   });
   const energy = prepareDoubleLayer({
     model: chosen.model,

@@ -8,6 +8,10 @@ const pair = {
   potential2_V: 0.024,
   kappaRadiusSmaller: 30,
   temperature_K: 298.15,
+  ions: [
+    { valence: 1, concentration_mol_m3: 10 },
+    { valence: -1, concentration_mol_m3: 10 },
+  ],
 } as const;
 const codes = (caveats: readonly { readonly code: string }[]) => caveats.map(({ code }) => code);
 
@@ -24,6 +28,19 @@ describe('chooseDoubleLayerModel by validity', () => {
     expect(model).toBe('superposition');
     expect(reason).toMatch(/45 mV/);
     expect(caveats).toEqual([]);
+  });
+
+  it('takes superposition at lower potentials where ions of two charges balance the surface', () => {
+    const ions = [
+      { valence: 2, concentration_mol_m3: 5 },
+      { valence: -1, concentration_mol_m3: 10 },
+    ];
+    const { model, reason } = chooseDoubleLayerModel({ ...pair, ions });
+    expect(model).toBe('superposition');
+    expect(reason).toMatch(/ions of higher charge/);
+    expect(chooseDoubleLayerModel({ ...pair, ions, potential1_V: -0.004, potential2_V: -0.004 }).model).toBe(
+      'constant-potential',
+    );
   });
 
   it('takes superposition with curvature below κa of 5, whatever the potential', () => {
