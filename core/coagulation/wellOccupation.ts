@@ -41,6 +41,6 @@ export function pairedShare({ energy_kT, radius_m, from_m, to_m, numberDensity_p
   }
   // 2 β n: twice the doublets per single, were all others single.
   const x = Math.exp(Math.min(logBeta + Math.log(2 * numberDensity_per_m3), 600));
-  // n₁/n = (√(1 + 4x) − 1)/2x, written so that small x keeps its digits.
-  return 1 - 2 / (1 + Math.sqrt(1 + 4 * x));
+  // 1 − n₁/n with n₁/n = (√(1 + 4x) − 1)/2x, written so that small x keeps its digits and no x gives more than one.
+  return Math.tanh(Math.asinh(2 * Math.sqrt(x)) / 2) ** 2;
 }

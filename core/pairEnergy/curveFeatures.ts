@@ -73,9 +73,12 @@ export function findFeatures(energy_kT: Energy, separation_m: Float64Array): Cur
   const maxima = extrema(values_kT, 1).map((index) => refined(scan, index, 1));
   const wall = values_kT[0] > values_kT[1] ? [contact] : [];
   const barrier = highest([...maxima, ...wall].filter((point) => point.energy_kT > SMALLEST_kT));
-  const divide = barrier ?? highest([...maxima, ...wall]);
   const minima = extrema(values_kT, -1).map((index) => refined(scan, index, -1));
   const wells = minima.filter((point) => point.energy_kT < -SMALLEST_kT);
+  // In the far tail rounding makes maxima of no height, and they stand above any maximum below zero: only one with a
+  // well beyond it parts the curve.
+  const parts = (point: CurvePoint): boolean => wells.some((well) => well.separation_m > point.separation_m);
+  const divide = barrier ?? highest([...maxima, ...wall].filter(parts));
   const isInside = (point: CurvePoint): boolean => divide === null || point.separation_m < divide.separation_m;
   const contactSide = [contact, ...wells].filter((point) => point.energy_kT < -SMALLEST_kT && isInside(point));
   const outside = divide === null ? [] : wells.filter((point) => point.separation_m > divide.separation_m);

@@ -17,16 +17,19 @@ export interface TurningPoint {
 }
 
 const STEPS_EACH_WAY = 12;
+/** Beyond this a value is as good as zero against the other, and equal steps serve better. */
+const WIDEST_RATIO = 1e9;
 const RELATIVE_TOLERANCE = 1e-3;
 
 /** From `current` outwards to `end`: equal ratios where both are of one sign, equal steps otherwise. */
 function outward(current: number, end: number): number[] {
-  const byRatio = current * end > 0;
+  const ratio = end / current;
+  const byRatio = ratio > 1 / WIDEST_RATIO && ratio < WIDEST_RATIO;
   return Array.from({ length: STEPS_EACH_WAY }, (_, index) => {
     const share = (index + 1) / STEPS_EACH_WAY;
     // Steps grow with the distance, so that a limit close by is not jumped over.
     const reach = share ** 1.5;
-    return byRatio ? current * (end / current) ** reach : current + (end - current) * reach;
+    return byRatio ? current * ratio ** reach : current + (end - current) * reach;
   });
 }
 

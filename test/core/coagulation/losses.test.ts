@@ -49,6 +49,15 @@ describe('lnHalfLife', () => {
     expect(Math.exp(ln)).toBe(Number.POSITIVE_INFINITY);
   });
 
+  it('for like particles costs three quarters of the singles: half-life and required ratio undo each other', () => {
+    fc.assert(
+      fc.property(encounters, fc.double({ min: -2, max: 600, noNaN: true }), (one, ln) => {
+        const crowd = { ...one, alike: true };
+        expect(lnRequiredStabilityRatio(Math.exp(lnHalfLife(ln, crowd)), 0.75, crowd)).toBeCloseTo(ln, 8);
+      }),
+    );
+  });
+
   it('for unlike particles halves the rarer kind: what the same time costs, asked back, is one half', () => {
     fc.assert(
       fc.property(encounters, (one) => {

@@ -235,6 +235,31 @@ describe('lnStabilityRatio obeys its law', () => {
     );
   });
 
+  it('asks for the energy fewer than 40 000 times, up to barriers of 1e5 kT, narrow and broad', () => {
+    fc.assert(
+      fc.property(
+        fc.double({ min: 0, max: 5, noNaN: true }),
+        fc.double({ min: 0.5e-9, max: 30e-9, noNaN: true }),
+        (decades, range_m) => {
+          let asked = 0;
+          const ln = lnStabilityRatio({
+            ...spheres(1e-7),
+            energy_kT: (h_m) => {
+              asked += 1;
+              return 2 * 10 ** decades * (2 * Math.exp(-h_m / range_m) - 1.5 * Math.exp(-(2 * h_m) / range_m));
+            },
+            contact_m: CONTACT_SEPARATION_m,
+          });
+          expect(asked).toBeLessThan(40_000);
+          // The top of 2q − 1.5q² is 2/3, at a gap of 0.4 ranges; the rest is how narrow it is.
+          expect(ln).toBeLessThan((4 / 3) * 10 ** decades + 3);
+          expect(ln).toBeGreaterThan((4 / 3) * 10 ** decades - 14);
+        },
+      ),
+      { numRuns: 60 },
+    );
+  });
+
   it('refuses what is no gap, no radius or no energy', () => {
     const sound = { ...spheres(1e-7), energy_kT: () => 0, contact_m: 1e-10 };
     expect(() => lnStabilityRatio({ ...sound, contact_m: 0 })).toThrow(/contact_m/);

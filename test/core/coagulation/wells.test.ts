@@ -52,6 +52,35 @@ describe('pairedShare obeys its law', () => {
     );
   });
 
+  it('for a shallow well is 2n times its volume integral, to all digits however rare the pairs (1e-5: the crossing)', () => {
+    fc.assert(
+      fc.property(
+        fc.double({ min: 1e-9, max: 1e-6, noNaN: true }),
+        fc.double({ min: 1e6, max: 1e15, noNaN: true }),
+        (depth_kT, density_per_m3) => {
+          const touch_m = 2e-7 + 1e-8;
+          // ∫ (2a + h)² (1 − (h − w)²/s²) dh over w ± s
+          const volume_m3 = 2 * Math.PI * depth_kT * 5e-9 * ((4 / 3) * touch_m ** 2 + (4 / 15) * 5e-9 ** 2);
+          expect(deviation(share(depth_kT, density_per_m3), 2 * density_per_m3 * volume_m3)).toBeLessThan(1e-5);
+        },
+      ),
+    );
+  });
+
+  it('obeys the law of mass action: share/(1 − share)² is proportional to the number of particles', () => {
+    fc.assert(
+      fc.property(
+        fc.double({ min: 0.1, max: 8, noNaN: true }),
+        fc.double({ min: 1e12, max: 1e19, noNaN: true }),
+        fc.double({ min: 1, max: 30, noNaN: true }),
+        (depth_kT, density_per_m3, times) => {
+          const ratio = (density: number) => share(depth_kT, density) / (1 - share(depth_kT, density)) ** 2;
+          expect(deviation(ratio(times * density_per_m3), times * ratio(density_per_m3))).toBeLessThan(1e-9);
+        },
+      ),
+    );
+  });
+
   it('is nothing without attraction', () => {
     expect(
       pairedShare({ energy_kT: () => 1, radius_m: 1e-7, from_m: 1e-9, to_m: 1e-7, numberDensity_per_m3: 1e20 }),

@@ -5,6 +5,7 @@ import { oneSidedOsmoticEnergy } from '../../../core/stericLayer/oneSidedLayer';
 import { elasticEnergy, osmoticEnergy } from '../../../core/stericLayer/vincent1986';
 import cases from '../../reference/rates/cases.json';
 import numbers from '../../reference/rates/numbers.json';
+import { forEachGaussPoint } from '../../../core/numerics/gaussLegendre';
 
 const deviation = (ours: number, theirs: number): number => Math.abs(ours / theirs - 1);
 const layer = { meanRadius_m: 1e-7, thickness_m: 5e-9, volumeFraction: 0.15 };
@@ -81,6 +82,68 @@ describe('the layer energies join', () => {
     fc.assert(
       fc.property(fc.double({ min: 0.01, max: 0.999, noNaN: true }), (share) => {
         expect(oneSidedAt(δ * share)).toBeLessThan(osmoticAt(δ * share));
+      }),
+    );
+  });
+});
+
+/** ∫ f over [from, to], in panels that keep ln x and its like well inside eight points. */
+function integral(f: (x: number) => number, from: number, to: number): number {
+  const ratio = (to / from) ** (1 / 32);
+  let sum = 0;
+  for (let panel = 0; panel < 32; panel += 1) {
+    forEachGaussPoint(from * ratio ** panel, from * ratio ** (panel + 1), (x, weight) => {
+      sum += weight * f(x);
+    });
+  }
+  return sum;
+}
+
+describe('spheres are 2πR times the integral of the energy of unit area, Derjaguin 1934 (1e-9)', () => {
+  const δ = layer.thickness_m;
+  const chi = 0.45;
+  const strength = ((0.5 - chi) * layer.volumeFraction ** 2) / solventMolecule_m3;
+  // 2πR of two equal spheres
+  const derjaguin_m = Math.PI * layer.meanRadius_m;
+  /** kT/m²: overlap of two layers at 2φ, then both squeezed into the gap. */
+  const osmoticPlates = (h_m: number) =>
+    h_m >= δ ? 2 * strength * (2 * δ - h_m) : strength * ((4 * δ * δ) / h_m - 2 * δ);
+  const onePlate = (h_m: number) => strength * ((δ * δ) / h_m - δ);
+  const elasticPlates = (h_m: number) => -2 * 1e17 * Math.log((h_m / δ) * ((3 - h_m / δ) / 2) ** 2);
+  const shares = fc.double({ min: 0.02, max: 0.98, noNaN: true });
+
+  it('osmotic, in both branches', () => {
+    fc.assert(
+      fc.property(shares, (share) => {
+        const pressed_m = δ * share;
+        const overlapped_m = δ * (1 + share);
+        const outer = derjaguin_m * integral(osmoticPlates, δ, 2 * δ);
+        const inner = derjaguin_m * integral(osmoticPlates, pressed_m, δ);
+        expect(deviation(osmoticAt(pressed_m), outer + inner)).toBeLessThan(1e-9);
+        const rest = derjaguin_m * integral(osmoticPlates, overlapped_m, 2 * δ);
+        expect(deviation(osmoticAt(overlapped_m), rest)).toBeLessThan(1e-9);
+      }),
+    );
+  });
+
+  it('elastic, and a single layer against a bare surface', () => {
+    fc.assert(
+      fc.property(shares, (share) => {
+        const elastic = derjaguin_m * integral(elasticPlates, δ * share, δ);
+        // Near its edge each is the small difference of numbers near one: 1e-15 of the whole.
+        expect(Math.abs(elasticAt(δ * share) - elastic)).toBeLessThan(1e-9 * elastic + 1e-13 * elasticAt(δ / 2));
+        const single = derjaguin_m * integral(onePlate, δ * share, δ);
+        expect(Math.abs(oneSidedAt(δ * share) - single)).toBeLessThan(1e-9 * single + 1e-13 * oneSidedAt(δ / 2));
+      }),
+    );
+  });
+
+  it('two squeezed layers are two single ones against the plane between them: 4 V₁(h/2), but for a constant', () => {
+    fc.assert(
+      fc.property(shares, (share) => {
+        const two_kT = osmoticAt(δ * share) - osmoticAt(δ);
+        const single_kT = oneSidedAt((δ * share) / 2) - oneSidedAt(δ / 2);
+        expect(Math.abs(two_kT - 4 * single_kT)).toBeLessThan(1e-12 * osmoticAt(δ * share));
       }),
     );
   });
