@@ -40,7 +40,7 @@ export function lnStabilityRatio({
   mustBePositive('lnStabilityRatio', { radius1_m, radius2_m, contact_m });
   const reach_m = radius1_m + radius2_m;
   const meanRadius_m = (2 * radius1_m * radius2_m) / reach_m;
-  const far_m = FAR_RADII * Math.max(radius1_m, radius2_m);
+  const far_m = FAR_RADII * Math.max(radius1_m, radius2_m, contact_m);
   const logIntegrand = (logSeparation: number): number => {
     const separation_m = Math.exp(logSeparation);
     const energy = energy_kT(separation_m);
