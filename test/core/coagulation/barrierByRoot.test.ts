@@ -30,18 +30,18 @@ const systems = [
 const questions = systems.flatMap((system) => [15, 20, 28].map((wanted) => ({ ...system, wanted })));
 
 describe('requiredBarrier against the curve that just gives the ln W asked for', () => {
-  it.each(questions)('a = $radius_m m, A = $hamakerConstant_J J, I = $ionicStrength_mol_m3 mM, ln W = $wanted: 1.5 kT', ({
-    wanted,
-    ...system
-  }) => {
-    const at = (potential_V: number) =>
-      alike({ ...system, potential_V, relativePermittivity: 78.3, temperature_K: 298.15 });
-    const potential_V = brentRoot((one_V) => lnOf(at(one_V)) - wanted, 5e-3, 0.2, 1e-9);
-    const ours_kT = requiredBarrier({
-      lnRequiredStabilityRatio: wanted,
-      meanRadius_m: system.radius_m,
-      repulsionRange_m: 1 / inverseDebyeLength(at(potential_V)),
-    });
-    expect(Math.abs(ours_kT - barrierOf(at(potential_V)))).toBeLessThan(1.5);
-  });
+  it.each(questions)(
+    'a = $radius_m m, A = $hamakerConstant_J J, I = $ionicStrength_mol_m3 mM, ln W = $wanted: 1.5 kT',
+    ({ wanted, ...system }) => {
+      const at = (potential_V: number) =>
+        alike({ ...system, potential_V, relativePermittivity: 78.3, temperature_K: 298.15 });
+      const potential_V = brentRoot((one_V) => lnOf(at(one_V)) - wanted, 5e-3, 0.2, 1e-9);
+      const ours_kT = requiredBarrier({
+        lnRequiredStabilityRatio: wanted,
+        meanRadius_m: system.radius_m,
+        repulsionRange_m: 1 / inverseDebyeLength(at(potential_V)),
+      });
+      expect(Math.abs(ours_kT - barrierOf(at(potential_V)))).toBeLessThan(1.5);
+    },
+  );
 });

@@ -37,19 +37,15 @@ describe('findFeatures on curves with known extrema (1e-6 of energy and place)',
 
   it('whatever the height from 0.1 to 1e5 kT, the range and the places', () => {
     fc.assert(
-      fc.property(
-        placesWith({ min: 1.2, max: 6 }),
-        fc.double({ min: -1, max: 5, noNaN: true }),
-        (places, decades) => {
-          const curve = cubicCurve(places, 10 ** decades);
-          const { barrier, outerMinimum } = findFeatures(curve.energy_kT, gridFor(places));
-          expect(deviation(barrier?.energy_kT ?? 0, curve.barrier.energy_kT)).toBeLessThan(1e-6);
-          expect(deviation(barrier?.separation_m ?? 0, places.barrier_m)).toBeLessThan(1e-6);
-          if (curve.outerMinimum.energy_kT > -2e-3) return;
-          expect(deviation(outerMinimum?.energy_kT ?? 0, curve.outerMinimum.energy_kT)).toBeLessThan(1e-6);
-          expect(deviation(outerMinimum?.separation_m ?? 0, places.outerMinimum_m)).toBeLessThan(1e-6);
-        },
-      ),
+      fc.property(placesWith({ min: 1.2, max: 6 }), fc.double({ min: -1, max: 5, noNaN: true }), (places, decades) => {
+        const curve = cubicCurve(places, 10 ** decades);
+        const { barrier, outerMinimum } = findFeatures(curve.energy_kT, gridFor(places));
+        expect(deviation(barrier?.energy_kT ?? 0, curve.barrier.energy_kT)).toBeLessThan(1e-6);
+        expect(deviation(barrier?.separation_m ?? 0, places.barrier_m)).toBeLessThan(1e-6);
+        if (curve.outerMinimum.energy_kT > -2e-3) return;
+        expect(deviation(outerMinimum?.energy_kT ?? 0, curve.outerMinimum.energy_kT)).toBeLessThan(1e-6);
+        expect(deviation(outerMinimum?.separation_m ?? 0, places.outerMinimum_m)).toBeLessThan(1e-6);
+      }),
       { numRuns: 200 },
     );
   });

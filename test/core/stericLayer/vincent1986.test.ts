@@ -1,11 +1,11 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { AVOGADRO_per_mol } from '../../../core/constants';
+import { forEachGaussPoint } from '../../../core/numerics/gaussLegendre';
 import { oneSidedOsmoticEnergy } from '../../../core/stericLayer/oneSidedLayer';
 import { elasticEnergy, osmoticEnergy } from '../../../core/stericLayer/vincent1986';
 import cases from '../../reference/rates/cases.json';
 import numbers from '../../reference/rates/numbers.json';
-import { forEachGaussPoint } from '../../../core/numerics/gaussLegendre';
 
 const deviation = (ours: number, theirs: number): number => Math.abs(ours / theirs - 1);
 const layer = { meanRadius_m: 1e-7, thickness_m: 5e-9, volumeFraction: 0.15 };
