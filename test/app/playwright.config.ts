@@ -15,8 +15,8 @@ export default defineConfig({
   workers: 2,
   retries: 0,
   forbidOnly: true,
-  timeout: 60_000,
-  expect: { timeout: 10_000 },
+  timeout: 180_000,
+  expect: { timeout: 20_000 },
   reporter: 'list',
   projects: [
     { name: 'stand-in', grepInvert: /@loopback/ },
