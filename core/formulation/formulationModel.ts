@@ -123,6 +123,14 @@ function problemsOf(formulation: Formulation, medium: MediumState, solids: numbe
 
 /** Converts once, at the door. Problems carry pointers within the formulation; the caller puts its own in front. */
 export function formulationModel(formulation: Formulation): Result<FormulationModel> {
+  if (!formulation.medium.components.some(({ volumeParts }) => volumeParts > 0)) {
+    return refused({
+      code: 'empty-medium',
+      at: '/medium/components/0',
+      message: 'The medium holds no liquid: every volume part is zero.',
+      remedy: 'Give at least one component a volume part above zero.',
+    });
+  }
   if (!viscosityIsKnown(formulation.medium)) {
     return refused({
       code: 'viscosity-unknown',

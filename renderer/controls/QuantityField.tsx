@@ -1,4 +1,4 @@
-import { useId, useState } from 'preact/hooks';
+import { useEffect, useId, useState } from 'preact/hooks';
 import { type QuantityKind, quantityKinds } from '../../core/quantities/quantityKinds';
 import { readQuantity } from '../../core/quantities/readQuantity';
 import { editedNumber } from '../format/numbers';
@@ -40,6 +40,12 @@ export function QuantityField(props: QuantityFieldProps) {
       ? (reading.value.note ?? `= ${reading.value.readAs}`)
       : null;
   const message = fault === undefined ? (problem ?? null) : `${fault.message} ${fault.remedy}`;
+
+  const readable = reading?.ok === true ? reading.value.value : null;
+  // What was refused for one kind may be readable for another: 4 wt %, once the loading is by mass.
+  useEffect(() => {
+    if (readable !== null && readable !== value) onCommit(readable);
+  }, [kind]);
 
   const type = (text: string): void => {
     setTyped(text);
